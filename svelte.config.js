@@ -1,0 +1,52 @@
+import adapter from '@sveltejs/adapter-node';
+import { vitePreprocess } from '@sveltejs/vite-plugin-svelte';
+import { mdsvex } from 'mdsvex';
+import mdsvexConfig from './mdsvex.config.js';
+
+/**
+ * mdsvex still writes Svelte 4 idioms into what it compiles; runes mode refuses `$$props`
+ * and warns about `context="module"` once per lesson.
+ * @type {import('svelte/compiler').PreprocessorGroup}
+ */
+const runesReady = {
+	name: 'runes-ready',
+	markup: ({ content, filename }) =>
+		filename?.endsWith('.svx')
+			? {
+					code: content
+						.replaceAll('{...$$props}', '')
+						.replaceAll('<script context="module"', '<script module')
+				}
+			: undefined
+};
+
+/** @type {import('@sveltejs/kit').Config} */
+const config = {
+	extensions: ['.svelte', '.svx'],
+	preprocess: [vitePreprocess(), mdsvex(mdsvexConfig), runesReady],
+	kit: {
+		adapter: adapter({ out: process.env.RINGLAND_BUILD_OUT ?? 'build', precompress: true }),
+		alias: { $lessons: 'lessons' },
+		// Style attributes and video.js need inline styles; scripts carry a nonce.
+		csp: {
+			mode: 'nonce',
+			directives: {
+				'default-src': ['self'],
+				'script-src': ['self'],
+				'style-src': ['self', 'unsafe-inline'],
+				'img-src': ['self', 'data:', 'blob:'],
+				'media-src': ['self', 'blob:'],
+				'font-src': ['self', 'data:'],
+				'connect-src': ['self'],
+				'worker-src': ['self', 'blob:'],
+				'manifest-src': ['self'],
+				'object-src': ['none'],
+				'base-uri': ['self'],
+				'frame-ancestors': ['none']
+				// form-action is set in hooks: it must allow the till, whose address is configuration.
+			}
+		}
+	}
+};
+
+export default config;
