@@ -1,0 +1,49 @@
+import type { Outcome } from '$lib/kernel/outcome';
+
+/**
+ * What a question may ask of one revision of a data sheet. `domain/data-sheets` gives it;
+ * questions know no more of a sheet than this, so that a sheet may grow without touching them.
+ */
+export type SheetFigure = {
+	key: string;
+	/** "Crankpin, diameter" */
+	words: string;
+	unit: string;
+	decimals: number;
+	/** The size it is meant to have, when the sheet states one. */
+	nominal?: number;
+	/** Limits for building new. */
+	least?: number;
+	most?: number;
+	/** Beyond this it does not run again; which way follows from `wearsBy`. */
+	wearLimit?: number;
+	wearsBy?: 'shrinking' | 'growing';
+};
+
+export type SheetBolt = { id: string; label?: string; xMm: number; yMm: number };
+
+export type SheetPattern = {
+	key: string;
+	words: string;
+	bolts: SheetBolt[];
+	/** The maker's printed order of bolt ids; where there is one, it wins. */
+	printedOrder?: string[];
+};
+
+export type SheetStage = { kind: 'torque'; torqueNm: number } | { kind: 'angle'; angleDeg: number };
+
+export type SheetTightening = {
+	key: string;
+	words: string;
+	stages: SheetStage[];
+	threadPitchMm?: number;
+	singleUse: boolean;
+};
+
+export type SheetFigures = {
+	/** "AV3-1150, revision 1" */
+	title: string;
+	figure(key: string): Outcome<SheetFigure>;
+	pattern(key: string): Outcome<SheetPattern>;
+	tightening(key: string): Outcome<SheetTightening>;
+};
