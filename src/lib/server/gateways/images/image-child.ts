@@ -1,0 +1,4 @@
+import { serve } from '../child/serve';
+import { cleanCopies } from './clean-copies';
+
+serve(cleanCopies);
