@@ -65,14 +65,10 @@ export type UseCase<Input, Out> = {
 };
 
 type ScopeOf<K extends Scope['kind']> = Extract<Scope, { kind: K }>;
-type Given<
-	A extends Action,
-	Z extends z.ZodType,
-	K extends Scope['kind'],
-	P,
-	S,
-	Out
-> = Omit<Spec<A, Z, ScopeOf<K>, P, S, Out>, 'where'> & { where?: K };
+type Given<A extends Action, Z extends z.ZodType, K extends Scope['kind'], P, S, Out> = Omit<
+	Spec<A, Z, ScopeOf<K>, P, S, Out>,
+	'where'
+> & { where?: K };
 
 /** A use case that changes something: queued, in one transaction with its ledger lines and jobs. */
 export function writeCase<
@@ -208,8 +204,14 @@ async function earlierAnswer(scope: Scope, caller: Caller, useCase: string, requ
 }
 
 function hashRequest(name: string, caller: Caller, input: unknown): string {
-	const text = canonicalize([name, caller.schoolId ?? null, JSON.parse(JSON.stringify(input ?? null))]);
-	return createHash('sha256').update(text ?? '').digest('hex');
+	const text = canonicalize([
+		name,
+		caller.schoolId ?? null,
+		JSON.parse(JSON.stringify(input ?? null))
+	]);
+	return createHash('sha256')
+		.update(text ?? '')
+		.digest('hex');
 }
 
 function ownerOf(actor: Actor): string {
