@@ -1,8 +1,9 @@
 import { sveltekit } from '@sveltejs/kit/vite';
 import { defineConfig } from 'vitest/config';
+import { childSource } from './child-source.ts';
 
 export default defineConfig({
-	plugins: [sveltekit()],
+	plugins: [childSource(), sveltekit()],
 	server: { fs: { allow: ['lessons'] } },
 	// Captions must stay files: small ones would become data: addresses, which the CSP refuses.
 	build: { assetsInlineLimit: (path) => (path.endsWith('.vtt') ? false : undefined) },

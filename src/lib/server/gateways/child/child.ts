@@ -95,7 +95,8 @@ function start(options: ChildOptions, onGone: (child: ChildProcess) => void): Ch
 /** Only a child with a question keeps the process alive. */
 function hold(child: ChildProcess, held: boolean): void {
 	const [, , stderr] = child.stdio as unknown as [unknown, unknown, { ref(): void; unref(): void }];
-	for (const one of [child, child.channel, stderr]) if (held) one?.ref();
+	for (const one of [child, child.channel, stderr])
+		if (held) one?.ref();
 		else one?.unref();
 }
 

@@ -1,7 +1,13 @@
 import { join } from 'node:path';
 import sharp, { type Sharp } from 'sharp';
 import { Problem } from '$lib/domain/problem';
-import { copies, largestPixels, type CleanCopy, type ImageAnswer, type ImageQuestion } from './copies';
+import {
+	copies,
+	largestPixels,
+	type CleanCopy,
+	type ImageAnswer,
+	type ImageQuestion
+} from './copies';
 import { likenessOf } from './likeness';
 import { readTags } from './read-tags';
 
@@ -38,14 +44,13 @@ export async function cleanCopies(question: ImageQuestion): Promise<ImageAnswer>
 	for (const { name, longestPx, type } of copies) {
 		const path = join(question.folder, name);
 		const sized = fit(plain(), longestPx);
-		const written = await (type === 'image/webp'
-			? sized.webp({ quality: 82 })
-			: sized.jpeg({ quality: 86 })
+		const written = await (
+			type === 'image/webp' ? sized.webp({ quality: 82 }) : sized.jpeg({ quality: 86 })
 		).toFile(path);
 		const { width: widthPx, height: heightPx } = written;
 		made.push({ name, path, mediaType: type, widthPx, heightPx });
 	}
-	const tags = await readTags(plain);
+	const tags = question.seekTags === false ? [] : await readTags(plain);
 	return { ...seen, copies: made, tags, likeness: await likenessOf(plain()) };
 }
 

@@ -19,6 +19,8 @@ export type ImageQuestion = {
 	/** An existing folder of the caller's; one file a copy is written there. */
 	folder: string;
 	mediaType: string;
+	/** Off for pictures that are no evidence: looking in vain takes seconds. */
+	seekTags?: boolean;
 };
 
 export type CleanCopy = {

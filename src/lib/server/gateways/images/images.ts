@@ -25,9 +25,11 @@ export function makeImages({ answerWithinMs = 30_000 } = {}): Images {
 		async cleanCopies(question) {
 			const other = await alsoIs(question.source);
 			if (other)
-				throw new Problem('input', 'This file is a picture and also a {other}. It was not taken.', {
-					other
-				});
+				throw new Problem(
+					'input',
+					'This file is a picture and a second thing at once ({other}). It was not taken.',
+					{ other }
+				);
 			return child.ask(question).catch(askAgainOrRefuse);
 		},
 		close: child.close
@@ -38,7 +40,7 @@ function askAgainOrRefuse(error: unknown): never {
 	if (!(error instanceof ChildFault)) throw error;
 	if (error.reason === 'too-slow')
 		throw new Problem('input', 'This picture takes too long to open. Take or send it again.');
-	throw new Problem('unavailable', 'The picture could not be worked on just now.', {}, {}, {
-		cause: error.message
-	});
+	const problem = new Problem('unavailable', 'The picture could not be worked on just now.');
+	problem.cause = error; // for the log; a page shows the words alone
+	throw problem;
 }
