@@ -13,7 +13,7 @@ export type NewMail = {
 };
 
 /** The one thing that is needed of the signing gateway, so that this layer does not know it. */
-export type Sealer = { seal: (plain: string) => string };
+export type Sealer = { seal: (secret: string, about: string) => string };
 
 export async function enqueueMail(
 	scope: Scope,
@@ -29,7 +29,7 @@ export async function enqueueMail(
 		kind: mail.kind,
 		recipient: mail.to,
 		payload: mail.payload,
-		sealed: mail.links ? sealer.seal(JSON.stringify(mail.links)) : null,
+		sealed: mail.links ? sealer.seal(JSON.stringify(mail.links), id) : null,
 		messageId: `<${id.toLowerCase()}@ringland.example>`,
 		state: 'waiting',
 		attempts: 0,
