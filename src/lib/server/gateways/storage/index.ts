@@ -1,0 +1,3 @@
+export { openDiskStorage } from './disk-storage';
+export { photographTypes, type MediaType } from './media-type';
+export { storageKey, type Kept, type Opened, type Received, type Storage } from './storage';
