@@ -43,7 +43,7 @@ async function bundled(entry: string): Promise<{ code: string; files: string[] }
 		}
 	});
 	const output = Array.isArray(made) ? made[0]?.output : 'output' in made ? made.output : undefined;
-	const chunks = (output ?? []).filter((one) => one.type === 'chunk');
+	const chunks = (output ?? []).flatMap((one) => (one.type === 'chunk' ? [one] : []));
 	const [only] = chunks;
 	if (!only || chunks.length !== 1) throw new Error(`${entry} must bundle to one chunk`);
 	return { code: only.code, files: only.moduleIds };

@@ -1,0 +1,7 @@
+export {
+	makeTill,
+	type CheckoutWanted,
+	type PaymentEvent,
+	type RefundWanted,
+	type Till
+} from './till';
