@@ -31,7 +31,7 @@ export const jobSheetsAndAwards = {
 			${schoolId}, id TEXT NOT NULL, submissionId TEXT NOT NULL, shotKey TEXT NOT NULL,
 			originalFileId TEXT NOT NULL, originalSha256 TEXT NOT NULL, smallFileId TEXT, mediumFileId TEXT,
 			largeFileId TEXT, state TEXT NOT NULL CHECK (state IN ('received', 'ready', 'refused')), fault TEXT,
-			tagFound TEXT CHECK (tagFound IN ('this-attempt', 'another', 'none')), takenInAt TEXT NOT NULL,
+			tagFound TEXT CHECK (tagFound IN ('this-attempt', 'another', 'none')), likeness TEXT, takenInAt TEXT NOT NULL,
 			removedAt TEXT, PRIMARY KEY (schoolId, id), ${inSchool('submissionId', 'submissions')},
 			${inSchool('originalFileId', 'files')}, ${inSchool('smallFileId', 'files')},
 			${inSchool('mediumFileId', 'files')}, ${inSchool('largeFileId', 'files')})`,

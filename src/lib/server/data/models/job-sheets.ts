@@ -51,6 +51,8 @@ export const photographs = schoolTable('photographs', {
 	fault: nullable(text()),
 	/** What the evidence tag in it says: found (this attempt's), other, or none. */
 	tagFound: nullable(text<'this-attempt' | 'another' | 'none'>()),
+	/** A fingerprint that stays nearly the same when a picture is saved again. */
+	likeness: nullable(text()),
 	takenInAt: instant(),
 	removedAt: nullable(instant())
 });
