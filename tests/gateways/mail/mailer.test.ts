@@ -48,7 +48,7 @@ it('delivers both bodies under the given Message-ID', async () => {
 			stream.on('end', () => done());
 		}
 	});
-	expect(await mailer.send(letter)).toMatchObject({ outcome: 'sent' });
+	expect(await mailer.send(letter)).toMatchObject({ kind: 'sent' });
 	const read = await simpleParser(Buffer.concat(got));
 	expect([read.messageId, read.subject, read.text?.trim(), read.html]).toEqual([
 		letter.messageId,
@@ -96,7 +96,7 @@ it.each([
 	async (_name, options, outcome) => {
 		const mailer = await mailServer(options);
 		const delivery = await mailer.send(letter);
-		expect(delivery.outcome, JSON.stringify(delivery)).toBe(outcome);
+		expect(delivery.kind, JSON.stringify(delivery)).toBe(outcome);
 	}
 );
 
@@ -113,8 +113,8 @@ it('signs in, and tries later when the password is wrong', async () => {
 	const port = await listening(server.server);
 	closing.push(() => new Promise<void>((done) => server.close(() => done())));
 	const at = (user: string) => makeMailer({ smtpUrl: `smtp://${user}@127.0.0.1:${port}` });
-	expect((await at('till:p%40ss%3Aword').send(letter)).outcome).toBe('sent');
-	expect((await at('till:other').send(letter)).outcome).toBe('later');
+	expect((await at('till:p%40ss%3Aword').send(letter)).kind).toBe('sent');
+	expect((await at('till:other').send(letter)).kind).toBe('later');
 });
 
 /** A server that speaks by a script and drops the line where told to. */
@@ -160,7 +160,7 @@ it.each([
 ] as const)('knows what a line that breaks at the %s means', async (dropAt, outcome) => {
 	const mailer = await droppingServer(dropAt);
 	const long = { ...letter, text: 'x'.repeat(200_000) };
-	expect((await mailer.send(dropAt === 'body' ? long : letter)).outcome).toBe(outcome);
+	expect((await mailer.send(dropAt === 'body' ? long : letter)).kind).toBe(outcome);
 });
 
 it('does not know when the server falls silent after the letter', async () => {
@@ -178,7 +178,7 @@ it('does not know when the server falls silent after the letter', async () => {
 	closing.push(() => new Promise<void>((done) => server.close(() => done())));
 	const timeouts = { connectionTimeout: 1000, greetingTimeout: 1000, socketTimeout: 300 };
 	const mailer = makeMailer({ smtpUrl: `smtp://127.0.0.1:${port}`, timeouts });
-	expect((await mailer.send(letter)).outcome).toBe('unsure');
+	expect((await mailer.send(letter)).kind).toBe('unsure');
 });
 
 it('tries later when nobody listens, and refuses what is no address', async () => {
@@ -186,9 +186,7 @@ it('tries later when nobody listens, and refuses what is no address', async () =
 	const port = await listening(server);
 	await new Promise((done) => server.close(done));
 	const mailer = makeMailer({ smtpUrl: `smtp://127.0.0.1:${port}` });
-	expect((await mailer.send(letter)).outcome).toBe('later');
-	expect((await mailer.send({ ...letter, to: '' })).outcome).toBe('refused');
-	expect((await mailer.send({ ...letter, to: 'a@x.example, b@x.example' })).outcome).toBe(
-		'refused'
-	);
+	expect((await mailer.send(letter)).kind).toBe('later');
+	expect((await mailer.send({ ...letter, to: '' })).kind).toBe('refused');
+	expect((await mailer.send({ ...letter, to: 'a@x.example, b@x.example' })).kind).toBe('refused');
 });

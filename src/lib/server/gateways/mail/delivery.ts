@@ -3,10 +3,8 @@
  * arrived, which is shown to people and never guessed.
  */
 export type Delivery =
-	| { outcome: 'sent'; response: string }
-	| { outcome: 'refused'; because: string }
-	| { outcome: 'later'; because: string }
-	| { outcome: 'unsure'; because: string };
+	| { kind: 'sent'; response: string; because?: undefined }
+	| { kind: 'refused' | 'later' | 'unsure'; because: string };
 
 /** Answers about our own signing in: a wrong setting must not use up every letter that waits. */
 const aboutSigningIn = new Set([530, 534, 535, 538]);
@@ -20,13 +18,13 @@ export function outcomeOf(error: Error, begun: boolean): Delivery {
 	};
 	const because = error.message.slice(0, 300);
 	if (responseCode === undefined) {
-		if (begun) return { outcome: 'unsure', because };
+		if (begun) return { kind: 'unsure', because };
 		// The address itself cannot be written into the dialogue.
-		if (code === 'EENVELOPE' && command === 'API') return { outcome: 'refused', because };
-		return { outcome: 'later', because };
+		if (code === 'EENVELOPE' && command === 'API') return { kind: 'refused', because };
+		return { kind: 'later', because };
 	}
 	const aboutTheLetter = ['MAIL FROM', 'RCPT TO', 'DATA'].includes(command ?? '');
 	if (responseCode >= 500 && aboutTheLetter && !aboutSigningIn.has(responseCode))
-		return { outcome: 'refused', because };
-	return { outcome: 'later', because };
+		return { kind: 'refused', because };
+	return { kind: 'later', because };
 }

@@ -43,7 +43,7 @@ export function makeMailer({
 			const envelope = mime.getEnvelope();
 			const bytes = await mime.build();
 			if (!envelope.from || envelope.to.length !== 1)
-				return { outcome: 'refused', because: 'There is not one usable address.' };
+				return { kind: 'refused', because: 'There is not one usable address.' };
 			const connection = new SMTPConnection({ ...where, ...timeouts });
 			return handOver(connection, auth, { from: envelope.from, to: envelope.to }, bytes);
 		}
@@ -69,7 +69,7 @@ function handOver(
 			ended = true;
 			const delivery: Delivery = error
 				? outcomeOf(error, begun)
-				: { outcome: 'sent', response: response.slice(0, 200) };
+				: { kind: 'sent', response: response.slice(0, 200) };
 			if (error) connection.close();
 			else connection.quit();
 			resolve(delivery);
