@@ -7,7 +7,7 @@ import { findSubmission, photographsOf } from '../../data/queries/submissions';
 import { submissions } from '../../data/models';
 import { update } from '../../data/rows';
 import { writeCase } from '../use-case';
-import { revisionsOfAttempt } from './step-context';
+import { revisionsOfAttempt } from '../../data/queries/attempt-context';
 
 export const handInSubmission = writeCase({
 	name: 'hand-in-submission',

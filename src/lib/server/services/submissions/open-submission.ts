@@ -7,7 +7,7 @@ import { attemptsOf } from '../../data/queries/submissions';
 import { submissions } from '../../data/models';
 import { insert } from '../../data/rows';
 import { writeCase } from '../use-case';
-import { jobSheetStep } from './step-context';
+import { jobSheetStep } from '../../data/queries/attempt-context';
 
 /** Opens an attempt with an evidence tag of its own. A second attempt begins empty beside the first. */
 export const openSubmission = writeCase({

@@ -10,7 +10,7 @@ import { findPhotograph, findSubmission } from '../../data/queries/submissions';
 import { submissions } from '../../data/models';
 import { update } from '../../data/rows';
 import { writeCase } from '../use-case';
-import { revisionsOfAttempt } from './step-context';
+import { revisionsOfAttempt } from '../../data/queries/attempt-context';
 
 /**
  * Takes operations from the student's page, each on top of a version that the page names. Where

@@ -1,9 +1,9 @@
 import type { Course, Step } from '$lib/domain/courses/schema';
 import { dataSheetSchema, type DataSheet } from '$lib/domain/data-sheets/schema';
 import type { JobSheet } from '$lib/domain/job-sheets/schema';
-import { findEnrolment, type EnrolmentLine } from '../../data/queries/enrolments';
-import { newestRevision, revisionById, type Revision } from '../../data/queries/publications';
-import type { SchoolScope } from '../../data/scope';
+import { findEnrolment, type EnrolmentLine } from './enrolments';
+import { newestRevision, revisionById, type Revision } from './publications';
+import type { SchoolScope } from '../scope';
 
 export type JobSheetContext = {
 	enrolment: EnrolmentLine;
