@@ -31,7 +31,8 @@ export const courseSchema = z
 		summary: words.max(600),
 		/** The data sheet that lessons, questions and job sheets take their values from. */
 		engine: slug,
-		outcomes: z.array(z.strictObject({ key: slug, words })).min(1),
+		/** `shownBy`: the steps of which any one, once competent, shows the outcome. */
+		outcomes: z.array(z.strictObject({ key: slug, words, shownBy: z.array(slug).min(1) })).min(1),
 		steps: z.array(step).min(1),
 		award,
 		priceMinor: z.number().int().min(0),
@@ -42,6 +43,10 @@ export const courseSchema = z
 		for (const key of keys)
 			if (keys.indexOf(key) !== keys.lastIndexOf(key))
 				context.addIssue({ code: 'custom', message: `the step ${key} stands twice` });
+		for (const outcome of course.outcomes)
+			for (const key of outcome.shownBy)
+				if (!keys.includes(key))
+					context.addIssue({ code: 'custom', message: `outcome ${outcome.key}: no step ${key}` });
 	});
 
 export type Course = z.infer<typeof courseSchema>;

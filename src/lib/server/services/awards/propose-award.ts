@@ -1,0 +1,51 @@
+import { z } from 'zod';
+import { awardRule } from '$lib/domain/certificates/rules/registry';
+import { awardsOf } from '../../data/queries/awards';
+import { findEnrolment } from '../../data/queries/enrolments';
+import { gatherEvidence } from '../../data/queries/evidence';
+import { awards, enrolments } from '../../data/models';
+import { find, insert } from '../../data/rows';
+import { acrossSchools, within } from '../../data/scope';
+import { writeCase } from '../use-case';
+
+/**
+ * Looks whether the award rule is met and, when it is, puts the award to a verifier. Asked after
+ * every change that can complete a course; asked twice it proposes once.
+ */
+export const proposeAward = writeCase({
+	name: 'propose-award',
+	action: 'system:run',
+	where: 'common',
+	input: z.object({ enrolmentId: z.string() }),
+	async subject({ scope, input }) {
+		const row = await find(acrossSchools(scope), enrolments, { id: input.enrolmentId });
+		return row && { row };
+	},
+	async run({ scope: everywhere, subject: { row }, at, newId, record }) {
+		const scope = within(everywhere, row.schoolId);
+		const enrolment = await findEnrolment(scope, row.id);
+		if (!enrolment) return { proposed: false };
+		const standing = await awardsOf(scope, enrolment.id);
+		if (standing.some((one) => one.state !== 'declined')) return { proposed: false };
+		const { course, evidence } = await gatherEvidence(scope, enrolment);
+		const verdict = awardRule(course.award.rule).decide(evidence);
+		if (!verdict.met) return { proposed: false, missing: verdict.missing };
+		const id = newId();
+		await insert(scope, awards, {
+			id,
+			enrolmentId: enrolment.id,
+			state: 'waiting',
+			rule: course.award.rule,
+			evidence,
+			because: verdict.because,
+			proposedAt: at.toISOString(),
+			decidedBy: null,
+			decidedAt: null,
+			reason: null
+		});
+		const { schoolId } = scope;
+		const data = { enrolment: enrolment.id, rule: course.award.rule };
+		await record({ schoolId, kind: 'award-proposed', subject: id, data });
+		return { proposed: true };
+	}
+});
