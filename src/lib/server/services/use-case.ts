@@ -5,6 +5,7 @@ import { may, mightEver } from '$lib/domain/access/policy';
 import type { Action, Subject } from '$lib/domain/access/subjects';
 import { membershipIn, type Actor } from '$lib/domain/actor';
 import { ulid } from '$lib/domain/ids';
+import { mailKindNamed } from '$lib/domain/mail/registry';
 import { inputProblem, Problem } from '$lib/domain/problem';
 import { appendToLedger, type LedgerLine } from '../data/queries/ledger';
 import { enqueueJob, type NewJob } from '../data/queries/jobs';
@@ -239,7 +240,12 @@ function pen(caller: Caller, scope: Scope, at: Date, newId: () => string): Writt
 			await appendToLedger(where, { ...line, actorId, at: at.toISOString() });
 		},
 		enqueue: (job) => enqueueJob(scope, job, newId(), at),
-		mail: (mail) => enqueueMail(scope, caller.house.gateways.signing, mail, newId, at)
+		mail(mail) {
+			// A letter that could not be rendered must fail here, not in the worker an hour later.
+			const { kind, payload, links } = mail;
+			mailKindNamed(kind).payload.parse({ ...payload, ...links });
+			return enqueueMail(scope, caller.house.gateways.signing, mail, newId, at);
+		}
 	};
 }
 

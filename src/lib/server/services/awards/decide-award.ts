@@ -7,6 +7,7 @@ import { inputProblem, Problem } from '$lib/domain/problem';
 import { findAward, markersOf } from '../../data/queries/awards';
 import { findEnrolment, type EnrolmentLine } from '../../data/queries/enrolments';
 import { gatherEvidence } from '../../data/queries/evidence';
+import { revisionById } from '../../data/queries/publications';
 import { findPerson, schoolById } from '../../data/queries/schools';
 import { accounts, awards, certificates } from '../../data/models';
 import { find, insert, update } from '../../data/rows';
@@ -48,7 +49,14 @@ export const decideAward = writeCase({
 				{ state: 'declined', ...decided }
 			);
 			await record({ kind: 'award-declined', subject: award.id, data: { reason: input.reason } });
-			await tell('award-decided', { decision: 'declined', reason: input.reason });
+			const revision = await revisionById(scope, enrolment.courseRevisionId);
+			const home = await schoolById(scope, scope.schoolId);
+			await tell('award-decided', {
+				courseTitle: revision?.title ?? '',
+				decision: 'declined',
+				reason: input.reason,
+				address: `${house.config.ORIGIN}/s/${home?.slug}/bench`
+			});
 			return { state: 'declined' as const, certificateId: null };
 		}
 		const { evidence, course, courseRevision } = await gatherEvidence(scope, enrolment);
@@ -103,8 +111,8 @@ export const decideAward = writeCase({
 		await tell('certificate-ready', {
 			courseTitle: course.title,
 			code,
-			link: `${house.config.ORIGIN}/s/${school?.slug}/certificates`,
-			checkLink: checkAddress(house.config.ORIGIN, code)
+			address: `${house.config.ORIGIN}/s/${school?.slug}/certificates`,
+			checkAddress: checkAddress(house.config.ORIGIN, code)
 		});
 		return { state: 'awarded' as const, certificateId };
 	}

@@ -90,9 +90,10 @@ export const signMark = writeCase({
 				payload: {
 					name: student.name,
 					jobSheetTitle: jobSheet.title,
+					attempt: attempt.attempt,
 					decision: decision.decision,
 					redo: decision.redo,
-					link: `${house.config.ORIGIN}/s/${school?.slug}/job-sheets/${enrolmentId}/${stepKey}/${attempt.id}`
+					address: `${house.config.ORIGIN}/s/${school?.slug}/job-sheets/${enrolmentId}/${stepKey}/${attempt.id}`
 				}
 			});
 		if (competent) await enqueue({ kind: 'propose-award', payload: { enrolmentId } });
