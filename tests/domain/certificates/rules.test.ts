@@ -11,7 +11,7 @@ describe('evidence-complete', () => {
 		expect(evidenceComplete.decide(evidence)).toEqual({
 			met: true,
 			because: [
-				'All 2 lessons were read.',
+				'Both lessons were read.',
 				'Quiz Torque and clearances. Passed: 9 of 10 points, 90 %. The cut score is 70 %.',
 				'Job sheet Measure a crankpin, on AV3-1150, stand 4, alone: competent at attempt 2, 4 March 2026.',
 				'Job sheet Argue a spun shell to its cause, on AV3-1150, stand 2, in a pair (took the readings of pins 1 and 3): competent at attempt 1, 18 March 2026.',

@@ -110,6 +110,14 @@ it('keeps schools apart, and the same content in one school once', async () => {
 	).rejects.toThrow();
 });
 
+it('may be told to keep the same again, as a transaction that is run again does', async () => {
+	const received = await storage.receive(chunks(jpegLike(700)), photographs);
+	const kept = await storage.keep(received, schoolId);
+	expect(await storage.keep(received, schoolId)).toEqual(kept);
+	await storage.remove(kept.key);
+	await expect(storage.keep(received, schoolId)).rejects.toThrow('ENOENT');
+});
+
 it('takes files made here', async () => {
 	const folder = await storage.workFolder();
 	await writeFile(join(folder, 'small'), 'made');

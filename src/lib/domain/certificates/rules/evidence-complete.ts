@@ -41,9 +41,12 @@ function lessonFindings(evidence: Evidence): Finding[] {
 	if (lessons.length === 0) return [];
 	if (open.length > 0)
 		return open.map((lesson) => lacking(`Lesson not finished: ${lesson.title}.`));
-	return [
-		met(lessons.length === 1 ? 'The lesson was read.' : `All ${lessons.length} lessons were read.`)
-	];
+	return [met(lessonWords(lessons.length))];
+}
+
+function lessonWords(count: number): string {
+	if (count === 1) return 'The lesson was read.';
+	return count === 2 ? 'Both lessons were read.' : `All ${count} lessons were read.`;
 }
 
 function quizFindings(evidence: Evidence): Finding[] {

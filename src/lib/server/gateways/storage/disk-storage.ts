@@ -21,8 +21,13 @@ export async function openDiskStorage(dataDir: string): Promise<Storage> {
 	};
 	const place = async (path: string, key: string) => {
 		const now = new Date();
-		await utimes(path, now, now); // the sweep counts from here
-		await moveDurably(path, pathOf(key));
+		try {
+			await utimes(path, now, now); // the sweep counts from here
+			await moveDurably(path, pathOf(key));
+		} catch (error) {
+			// A use case that is run again keeps what its first run has moved already.
+			if (!isMissing(error) || !(await stat(pathOf(key)).catch(() => null))) throw error;
+		}
 	};
 
 	return {
@@ -70,7 +75,10 @@ export async function openDiskStorage(dataDir: string): Promise<Storage> {
 }
 
 function absent(error: unknown): never {
-	if (error instanceof Error && 'code' in error && error.code === 'ENOENT')
-		throw new Problem('absent', 'This file is not there.');
+	if (isMissing(error)) throw new Problem('absent', 'This file is not there.');
 	throw error;
+}
+
+function isMissing(error: unknown): boolean {
+	return error instanceof Error && 'code' in error && error.code === 'ENOENT';
 }

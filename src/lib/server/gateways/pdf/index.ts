@@ -1,0 +1,2 @@
+export { makePdfPrinter, type PdfPrinter } from './pdf-printer';
+export type { PrintQuestion } from './print-certificate';

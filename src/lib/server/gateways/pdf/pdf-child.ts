@@ -1,0 +1,4 @@
+import { serve } from '../child/serve';
+import { printCertificate } from './print-certificate';
+
+serve(printCertificate);
