@@ -43,7 +43,7 @@ const long: CertificateFace = {
 beforeAll(async () => {
 	folder = await mkdtemp(join(tmpdir(), 'ringland-pdf-'));
 	path = join(folder, 'certificate.pdf');
-	await writeFile(path, await printer.certificate({ face, checkAddress: address }));
+	await writeFile(path, await printer.printCertificate({ face, checkAddress: address }));
 });
 afterAll(async () => {
 	await printer.close();
@@ -54,16 +54,16 @@ const words = (text: string) => text.replace(/\s+/g, ' ');
 
 it('gives the same bytes for the same facts, and other bytes for others', async () => {
 	const first = await readFile(path);
-	expect(first.equals(await printer.certificate({ face, checkAddress: address }))).toBe(true);
+	expect(first.equals(await printer.printCertificate({ face, checkAddress: address }))).toBe(true);
 	const other = { ...face, awardedOn: '2026-03-21' };
-	expect(first.equals(await printer.certificate({ face: other, checkAddress: address }))).toBe(
+	expect(first.equals(await printer.printCertificate({ face: other, checkAddress: address }))).toBe(
 		false
 	);
 });
 
 it('refuses letters that it cannot print, and prints Greek and Cyrillic names', async () => {
 	const named = (personName: string) =>
-		printer.certificate({ face: { ...face, personName }, checkAddress: address });
+		printer.printCertificate({ face: { ...face, personName }, checkAddress: address });
 	await expect(named('漢字 Name')).rejects.toMatchObject({
 		code: 'refused',
 		parameters: { letters: '漢 字' }
@@ -139,7 +139,10 @@ describe.skipIf(!poppler)('as poppler reads it (skipped: install poppler-utils)'
 
 	it('goes on over sheets when it is long, with the code on each', async () => {
 		const longPath = join(folder, 'long.pdf');
-		await writeFile(longPath, await printer.certificate({ face: long, checkAddress: address }));
+		await writeFile(
+			longPath,
+			await printer.printCertificate({ face: long, checkAddress: address })
+		);
 		const { stdout } = await run('pdftotext', ['-layout', longPath, '-']);
 		const sheets = stdout.split('\f').filter((one) => one.trim());
 		expect(sheets.length).toBeGreaterThan(1);

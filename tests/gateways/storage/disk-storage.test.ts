@@ -121,9 +121,12 @@ it('may be told to keep the same again, as a transaction that is run again does'
 it('takes files made here', async () => {
 	const folder = await storage.workFolder();
 	await writeFile(join(folder, 'small'), 'made');
+	await writeFile(join(folder, 'large'), 'larger');
 	const kept = await storage.keepMade(join(folder, 'small'), schoolId, 'image/webp');
 	expect(kept.bytes).toBe(4);
-	expect(await readdir(folder)).toEqual([]);
+	expect(await readdir(folder)).toEqual(['large']);
+	await storage.keepMade(join(folder, 'large'), schoolId, 'image/jpeg');
+	await expect(readdir(folder)).rejects.toThrow('ENOENT');
 });
 
 it('sweeps orphans and old quarantine, and nothing that is known or fresh', async () => {

@@ -8,7 +8,7 @@ export type PdfPrinter = {
 	 * A certificate as a tagged PDF. The same face and address give the same bytes.
 	 * @throws Problem 'refused' where the fonts lack a letter; 'unavailable' to try again later
 	 */
-	certificate: (question: PrintQuestion) => Promise<Buffer>;
+	printCertificate: (question: PrintQuestion) => Promise<Buffer>;
 	close: () => Promise<void>;
 };
 
@@ -20,7 +20,7 @@ export function makePdfPrinter({ answerWithinMs = 20_000 } = {}): PdfPrinter {
 		answerWithinMs
 	});
 	return {
-		async certificate(question) {
+		async printCertificate(question) {
 			const bytes = await child.ask(question).catch((error: unknown) => {
 				if (!(error instanceof ChildFault)) throw error;
 				const problem = new Problem(

@@ -1,6 +1,6 @@
 import { createHash } from 'node:crypto';
 import { createReadStream } from 'node:fs';
-import { mkdtemp, open, rm, stat, utimes } from 'node:fs/promises';
+import { mkdtemp, open, rm, rmdir, stat, utimes } from 'node:fs/promises';
 import { dirname, join } from 'node:path';
 import { Problem } from '$lib/domain/problem';
 import { makeFolder, moveDurably, syncFile, syncFolder } from './durable';
@@ -49,6 +49,8 @@ export async function openDiskStorage(dataDir: string): Promise<Storage> {
 			const key = storageKey(schoolId, sha256);
 			await syncFile(path);
 			await place(path, key);
+			// The work folder goes with the last file that is taken out of it.
+			await rmdir(dirname(path)).catch(() => undefined);
 			return { key, bytes, sha256, mediaType };
 		},
 		discard: (received) => rm(received.path, { force: true }),

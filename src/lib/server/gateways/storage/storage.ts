@@ -30,7 +30,7 @@ export type Storage = {
 	/** The same for a file made here (a clean copy, a certificate): it is moved away from `path`. */
 	keepMade: (path: string, schoolId: string, mediaType: MediaType) => Promise<Kept>;
 	discard: (received: Received) => Promise<void>;
-	/** A folder of its own for making files that `keepMade` then takes. */
+	/** A folder of its own for making files. It goes when `keepMade` has taken the last of them. */
 	workFolder: () => Promise<string>;
 	/** Where a program of ours may read the file: for image work, never for an answer. */
 	pathOf: (key: StorageKey) => string;
