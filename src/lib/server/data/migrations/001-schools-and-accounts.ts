@@ -34,6 +34,10 @@ export const schoolsAndAccounts = {
 			${schoolId}, personId TEXT NOT NULL,
 			role TEXT NOT NULL CHECK (role IN ('student', 'instructor', 'verifier', 'admin')),
 			givenAt TEXT NOT NULL, PRIMARY KEY (schoolId, personId, role), ${inSchool('personId', 'people')})`,
+		`CREATE TABLE role_invitations (
+			${schoolId}, id TEXT NOT NULL, email TEXT NOT NULL CHECK (email = lower(email)), name TEXT NOT NULL,
+			roles TEXT NOT NULL, invitedBy TEXT NOT NULL, invitedAt TEXT NOT NULL, acceptedAt TEXT,
+			PRIMARY KEY (schoolId, id), UNIQUE (schoolId, email), ${inSchool('invitedBy', 'people')})`,
 		`CREATE TABLE api_tokens (
 			${schoolId}, id TEXT NOT NULL, name TEXT NOT NULL, tokenHash TEXT NOT NULL UNIQUE, scopes TEXT NOT NULL,
 			createdBy TEXT NOT NULL, createdAt TEXT NOT NULL, lastUsedAt TEXT, revokedAt TEXT,

@@ -32,7 +32,8 @@ export const sessions = commonTable('sessions', {
 	expiresAt: instant()
 });
 
-export type TokenPurpose = 'sign-in' | 'password' | 'invitation' | 'first-school' | 'mailbox-proof';
+export type TokenPurpose =
+	'sign-in' | 'password' | 'invitation' | 'role-invitation' | 'first-school';
 
 /** One-time links: only the hash is kept, and one atomic delete uses a token up. */
 export const tokens = commonTable('tokens', {
@@ -71,6 +72,17 @@ export const personRoles = schoolTable('person_roles', {
 	personId: key(),
 	role: { ...text<Role>(), key: true },
 	givenAt: instant()
+});
+
+/** Somebody asked to work in the school; accepting makes the person and gives the roles. */
+export const roleInvitations = schoolTable('role_invitations', {
+	id: key(),
+	email: text(),
+	name: text(),
+	roles: json<Role[]>(),
+	invitedBy: text(),
+	invitedAt: instant(),
+	acceptedAt: nullable(instant())
 });
 
 /** For a school's own scripts. */

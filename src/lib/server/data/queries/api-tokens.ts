@@ -1,0 +1,40 @@
+import { anyone, type Actor } from '$lib/domain/actor';
+import { apiTokens } from '../models';
+import { find, insert, select, update } from '../rows';
+import { acrossSchools, type Scope, type SchoolScope } from '../scope';
+import { tokenHash } from './tokens';
+
+/** A school's script by its bearer token; a revoked or unknown one is anybody. */
+export async function actorOfBearer(scope: Scope, token: string): Promise<Actor> {
+	const row = await find(acrossSchools(scope), apiTokens, { tokenHash: tokenHash(token) });
+	if (!row || row.revokedAt) return anyone;
+	return { kind: 'script', tokenId: row.id, schoolId: row.schoolId, scopes: row.scopes };
+}
+
+export async function makeApiToken(
+	scope: SchoolScope,
+	row: {
+		id: string;
+		name: string;
+		scopes: string[];
+		createdBy: string;
+		createdAt: string;
+		token: string;
+	}
+) {
+	const { token, ...rest } = row;
+	await insert(scope, apiTokens, {
+		...rest,
+		tokenHash: tokenHash(token),
+		lastUsedAt: null,
+		revokedAt: null
+	});
+}
+
+export function apiTokensOf(scope: SchoolScope) {
+	return select(scope, apiTokens, {}, { order: [['createdAt', 'desc']] });
+}
+
+export function revokeApiToken(scope: SchoolScope, id: string, at: string) {
+	return update(scope, apiTokens, { id, revokedAt: null }, { revokedAt: at });
+}
