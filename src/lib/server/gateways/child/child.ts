@@ -39,18 +39,27 @@ export function makeChild<In, Out>(options: ChildOptions): Child<In, Out> {
 	let rest: NodeJS.Timeout | undefined;
 	let number = 0;
 
+	/** Forgets at once: one that was told to go may take a moment, and must not get a question. */
+	const forget = (child: ChildProcess) => {
+		if (running === child) running = undefined;
+	};
+
 	async function turn(input: In): Promise<Out> {
 		clearTimeout(rest);
-		running ??= start(options, (gone) => {
-			if (running === gone) running = undefined;
-		});
+		running ??= start(options, forget);
 		const child = running;
 		hold(child, true);
 		try {
 			return await exchange<In, Out>(child, { number: ++number, input }, options.answerWithinMs);
+		} catch (error) {
+			if (error instanceof ChildFault && error.reason !== 'fault') forget(child);
+			throw error;
 		} finally {
 			hold(child, false);
-			rest = setTimeout(() => child.disconnect?.(), options.restAfterMs ?? 30_000);
+			rest = setTimeout(() => {
+				forget(child);
+				if (child.connected) child.disconnect();
+			}, options.restAfterMs ?? 30_000);
 			rest.unref();
 		}
 	}

@@ -38,7 +38,7 @@ const formatOf: Record<string, string> = {
  */
 export async function cleanCopies(question: ImageQuestion): Promise<ImageAnswer> {
 	const seen = await lookedAt(question);
-	const { data, info } = await decoded(question.source);
+	const { data, info } = await decoded(question);
 	const plain = () => sharp(data, { raw: { width: info.width, height: info.height, channels: 3 } });
 	const made: CleanCopy[] = [];
 	for (const { name, longestPx, type } of copies) {
@@ -55,14 +55,11 @@ export async function cleanCopies(question: ImageQuestion): Promise<ImageAnswer>
 }
 
 async function lookedAt({ source, mediaType }: ImageQuestion) {
-	const found = await open(source).metadata().catch(refuse);
+	const found = await open(source, mediaType).metadata().catch(refuse(mediaType));
 	if (found.format !== formatOf[mediaType])
 		throw new Problem('input', 'This file says that it is one kind of picture and is another.');
 	const { width, height } = found.autoOrient;
-	if (width * height > largestPixels)
-		throw new Problem('too-large', 'This picture has more than {most} megapixels.', {
-			most: largestPixels / 1e6
-		});
+	if (width * height > largestPixels(mediaType)) throw tooLarge(mediaType);
 	if (Math.min(width, height) < 16)
 		throw new Problem('input', 'This picture is only {width} by {height} pixels.', {
 			width,
@@ -71,29 +68,34 @@ async function lookedAt({ source, mediaType }: ImageQuestion) {
 	return { widthPx: width, heightPx: height };
 }
 
-function decoded(source: string) {
-	return fit(open(source).autoOrient(), copies.at(-1)?.longestPx ?? 0)
+function decoded({ source, mediaType }: ImageQuestion) {
+	return fit(open(source, mediaType).autoOrient(), copies.at(-1)?.longestPx ?? 0)
 		.flatten({ background: '#ffffff' })
 		.toColourspace('srgb')
 		.removeAlpha()
 		.raw()
 		.toBuffer({ resolveWithObject: true })
-		.catch(refuse);
+		.catch(refuse(mediaType));
 }
 
-function open(source: string): Sharp {
-	return sharp(source, { limitInputPixels: largestPixels, failOn: 'error', pages: 1 });
+function open(source: string, mediaType: string): Sharp {
+	const limitInputPixels = largestPixels(mediaType);
+	return sharp(source, { limitInputPixels, failOn: 'error', pages: 1 });
 }
 
 function fit(picture: Sharp, longestPx: number): Sharp {
 	return picture.resize(longestPx, longestPx, { fit: 'inside', withoutEnlargement: true });
 }
 
-function refuse(error: unknown): never {
-	const text = error instanceof Error ? error.message : '';
-	if (/pixel limit/i.test(text))
-		throw new Problem('too-large', 'This picture has more than {most} megapixels.', {
-			most: largestPixels / 1e6
-		});
-	throw new Problem('input', 'This picture is damaged or cut short. Take or send it again.');
+function refuse(mediaType: string): (error: unknown) => never {
+	return (error) => {
+		if (error instanceof Error && /pixel limit/i.test(error.message)) throw tooLarge(mediaType);
+		throw new Problem('input', 'This picture is damaged or cut short. Take or send it again.');
+	};
+}
+
+function tooLarge(mediaType: string): Problem {
+	return new Problem('too-large', 'This picture has more than {most} megapixels.', {
+		most: largestPixels(mediaType) / 1e6
+	});
 }

@@ -2,9 +2,9 @@ import { createCipheriv, createDecipheriv, hkdfSync, randomBytes } from 'node:cr
 
 export type Sealing = {
 	/** @param about what it belongs to (a job's id): it opens under the same words alone */
-	seal: (secret: string, about?: string) => string;
+	seal: (secret: string, about: string) => string;
 	/** @throws Error where it was changed, sealed with another key, or belongs elsewhere */
-	open: (sealed: string, about?: string) => string;
+	open: (sealed: string, about: string) => string;
 	/** A key for one purpose, the same at each start: session marks, known devices, addresses. */
 	keyFor: (purpose: string) => Uint8Array;
 };
@@ -22,14 +22,14 @@ export function makeSealing(master: Uint8Array): Sealing {
 	const key = keyFor('sealing');
 	return {
 		keyFor,
-		seal(secret, about = '') {
+		seal(secret, about) {
 			const nonce = randomBytes(12);
 			const cipher = createCipheriv('aes-256-gcm', key, nonce).setAAD(Buffer.from(about));
 			const text = Buffer.concat([cipher.update(secret, 'utf8'), cipher.final()]);
 			const parts = [nonce, cipher.getAuthTag(), text].map((one) => one.toString('base64url'));
 			return [version, ...parts].join('.');
 		},
-		open(sealed, about = '') {
+		open(sealed, about) {
 			const [kind, nonce, tag, text] = sealed.split('.');
 			if (kind !== version || !nonce || !tag || text === undefined)
 				throw new Error('This is no sealed secret.');
