@@ -35,11 +35,21 @@ export async function readToken(scope: Scope, purpose: TokenPurpose, token: stri
 }
 
 /** Uses a token up. Of two that come at once, one gets it: the delete decides. */
-export async function useToken(scope: Scope, purpose: TokenPurpose, token: string, at: Date) {
-	const identifier = await readToken(scope, purpose, token, at);
-	if (identifier === undefined) return undefined;
-	const gone = await remove(acrossSchools(scope), tokens, { tokenHash: tokenHash(token), purpose });
-	return gone === 1 ? identifier : undefined;
+export function useToken(scope: Scope, purpose: TokenPurpose, token: string, at: Date) {
+	return endTokenWithHash(scope, purpose, tokenHash(token), at);
+}
+
+/** The same for who is given the hash only, as Auth.js hands it on. */
+export async function endTokenWithHash(
+	scope: Scope,
+	purpose: TokenPurpose,
+	hash: string,
+	at: Date
+): Promise<string | undefined> {
+	const held = { tokenHash: hash, purpose };
+	const found = await find(acrossSchools(scope), tokens, held);
+	const gone = await remove(acrossSchools(scope), tokens, held);
+	return found && gone === 1 && found.expiresAt > at.toISOString() ? found.identifier : undefined;
 }
 
 export function endTokens(scope: Scope, purpose: TokenPurpose, identifier: string) {

@@ -1,96 +1,71 @@
 import { z } from 'zod';
-import { addressBucket, forgottenAfterMs, waitMs } from '$lib/domain/accounts/wait';
+import { demoPassword } from '$lib/domain/accounts/demo-password';
+import { emailAddress } from '$lib/domain/accounts/email';
 import { Problem } from '$lib/domain/problem';
-import {
-	accountByEmail,
-	attempts,
-	forgetAttempts,
-	isKnownDevice,
-	keepAttempts
-} from '../../data/queries/accounts';
-import type { Scope } from '../../data/scope';
-import { verifyPassword } from '../../gateways/passwords/passwords';
-import { commonScope } from '../../data/scope';
 import { isLoopback } from '../../config/env';
-import { writeCase } from '../use-case';
+import { accountByEmail } from '../../data/queries/accounts';
+import { forgetTries, giveTurnBack } from '../../data/queries/sign-in-tries';
+import { verifyPassword } from '../../gateways/passwords/passwords';
+import type { Caller } from '../use-case';
+import { readCase, writeCase } from '../use-case';
+import { bucketsOf, countTry, tryOrigin, type TryOrigin } from './wait-buckets';
 
-export const demoPassword = 'averholm-demo';
+const password = z.string().min(1, 'Give your password.').max(200, 'This is too long.');
 
-const where = { address: z.string(), device: z.string().nullable() };
-export type SignInFrom = { address: string; device: string | null };
-
-/** Throws while an account or an address has to wait. A known device is not held up by strangers. */
-export async function demandNoWait(
-	scope: Scope,
-	asked: { accountKey: string | null; address: string; knownDevice: boolean },
-	at: Date
-): Promise<void> {
-	const buckets = [`address:${addressBucket(asked.address)}`];
-	if (asked.accountKey && !asked.knownDevice) buckets.push(`account:${asked.accountKey}`);
-	for (const bucket of buckets) {
-		const held = await attempts(scope, bucket);
-		if (held?.waitUntil && held.waitUntil > at.toISOString())
-			throw new Problem('too-many', 'Too many tries that failed. Try again after {until}.', {
-				until: new Date(held.waitUntil)
-			});
-	}
-}
-
-/** Counts one failure against the account and the address; each failure makes the next wait longer. */
-export const countFailure = writeCase({
-	name: 'count-failure',
-	action: 'site:read',
+/** Counts the try before the password is looked at: tries sent at once are all counted. */
+const beginTry = writeCase({
+	name: 'begin-sign-in',
+	action: 'session:ask',
 	where: 'common',
-	input: z.object({ accountKey: z.string().nullable(), address: z.string() }),
+	input: z.object({ email: emailAddress, ...tryOrigin }),
 	subject: () => Promise.resolve({}),
-	async run({ scope, input, at }) {
-		const buckets: ['address' | 'account', string][] = [
-			['address', `address:${addressBucket(input.address)}`]
-		];
-		if (input.accountKey) buckets.push(['account', `account:${input.accountKey}`]);
-		for (const [kind, bucket] of buckets) {
-			const held = await attempts(scope, bucket);
-			const stale = held && at.getTime() - Date.parse(held.lastAt) > forgottenAfterMs;
-			const failures = (held && !stale ? held.failures : 0) + 1;
-			const wait = waitMs(failures, kind);
-			const waitUntil = wait > 0 ? new Date(at.getTime() + wait).toISOString() : null;
-			await keepAttempts(scope, { bucket, failures, lastAt: at.toISOString(), waitUntil });
-		}
-		return { counted: true };
+	async run({ scope, house, input, at }) {
+		await countTry(scope, await bucketsOf(scope, house, input.email, input, 'password'), at);
+	}
+});
+
+/** Looks at the password; as slow for an address without an account as for one with. */
+const checkPassword = readCase({
+	name: 'check-password',
+	action: 'session:ask',
+	where: 'common',
+	input: z.object({ email: emailAddress, password }),
+	subject: () => Promise.resolve({}),
+	async run({ scope, house, input }) {
+		if (input.password === demoPassword && !isLoopback(house.config.ORIGIN)) return null;
+		const account = await accountByEmail(scope, input.email);
+		const right = await verifyPassword(account?.passwordHash ?? null, input.password);
+		return account && right ? { accountId: account.id, name: account.name } : null;
+	}
+});
+
+const tryWasRight = writeCase({
+	name: 'sign-in-was-right',
+	action: 'session:ask',
+	where: 'common',
+	input: z.object({ email: emailAddress, ...tryOrigin }),
+	subject: () => Promise.resolve({}),
+	async run({ scope, house, input }) {
+		const [address, own] = await bucketsOf(scope, house, input.email, input, 'password');
+		if (address) await giveTurnBack(scope, address.name, address.rule);
+		if (own) await forgetTries(scope, own.name);
 	}
 });
 
 /**
- * Checks an address and a password. An unknown address takes as long and says the same as a
- * wrong password. A failure is counted in a transaction of its own by the caller.
+ * One try with a password, whichever page it comes from.
+ * @returns the account, whose session the edge then opens
+ * @throws Problem 'too-many' during a wait; 'input' where address or password is wrong, in the
+ * same words for both
  */
-export const checkPassword = writeCase({
-	name: 'check-password',
-	action: 'site:read',
-	where: 'common',
-	input: z.object({
-		email: z.string().trim().toLowerCase().max(254),
-		password: z.string().max(200),
-		...where
-	}),
-	async prepare({ house, input, at }) {
-		const scope = commonScope(house.database, null);
-		const account = await accountByEmail(scope, input.email);
-		const knownDevice = Boolean(
-			account && input.device && (await isKnownDevice(scope, account.id, input.device))
-		);
-		const asked = { accountKey: input.email, address: input.address, knownDevice };
-		await demandNoWait(scope, asked, at);
-		const right = await verifyPassword(account?.passwordHash ?? null, input.password);
-		const demo = input.password === demoPassword && !isLoopback(house.config.ORIGIN);
-		return { account, ok: right && !demo, demo: right && demo };
-	},
-	subject: () => Promise.resolve({}),
-	async run({ scope, input, prepared }) {
-		if (prepared.demo)
-			throw new Problem('input', 'Demo passwords work on this machine only. Set one of your own.');
-		if (!prepared.ok || !prepared.account) return { accountId: null };
-		await forgetAttempts(scope, `account:${input.email}`);
-		return { accountId: prepared.account.id };
-	}
-});
+export async function tryPassword(
+	caller: Caller,
+	given: { email: string; password: string } & TryOrigin
+): Promise<{ accountId: string; name: string }> {
+	const { email, address, deviceHash } = given;
+	await beginTry(caller, { email, address, deviceHash });
+	const found = await checkPassword(caller, { email, password: given.password });
+	if (!found) throw new Problem('input', 'The e-mail address or the password is not right.');
+	await tryWasRight(caller, { email, address, deviceHash });
+	return found;
+}

@@ -1,6 +1,11 @@
+import { system } from '$lib/domain/actor';
+import { proposeAward } from '../../services/awards/propose-award';
+import { settlePayment } from '../../services/cohorts/settle-payment';
 import type { House } from '../../services/house';
+import { endOverdueSittings } from '../../services/quizzes/end-sitting';
+import { copyPhotograph } from '../../services/submissions/copy-photograph';
+import type { Caller } from '../../services/use-case';
 import { sendMail } from './send-mail';
-import { settlePayment } from './settle-payment';
 import { signLedgerHeads } from './sign-ledger-heads';
 
 /** One line a kind of job. Each can be run again: it asks first what is already done. */
@@ -8,10 +13,18 @@ export type Handler = (
 	house: House,
 	payload: Record<string, unknown>,
 	attempt: number
-) => Promise<void>;
+) => Promise<unknown>;
 
 export const handlers: Record<string, Handler> = {
 	'send-mail': sendMail,
-	'settle-payment': settlePayment,
-	'sign-ledger-heads': signLedgerHeads
+	'sign-ledger-heads': signLedgerHeads,
+	'settle-payment': asSystem(settlePayment),
+	'copy-photograph': asSystem(copyPhotograph),
+	'propose-award': asSystem(proposeAward),
+	'end-overdue-sittings': asSystem(endOverdueSittings)
 };
+
+/** A use case that the house itself runs. */
+function asSystem(useCase: (caller: Caller, input: unknown) => Promise<unknown>): Handler {
+	return (house, payload) => useCase({ house, actor: system, schoolId: undefined }, payload);
+}
