@@ -1,5 +1,6 @@
 import '@auth/sveltekit';
-import type { Actor, Membership } from '$lib/domain/actor';
+import type { Actor } from '$lib/domain/actor';
+import type { SchoolFace } from '$lib/server/services/accounts/find-school';
 import type { House } from '$lib/server/services/house';
 import type { Caller } from '$lib/server/services/use-case';
 
@@ -13,12 +14,14 @@ declare global {
 		interface Locals {
 			house: House;
 			requestId: string;
-			/** Who asks: read from the session once, when somebody wants to know. */
+			/** Who asks: read once, when somebody wants to know. */
 			actor: () => Promise<Actor>;
-			/** The school of the address, with the asker's membership in it. */
-			school?: { id: string; slug: string; name: string; locale: string; timeZone: string };
-			membership?: Membership;
+			/** The school of the address; undefined where it names none, or one that is not there. */
+			school?: SchoolFace;
+			/** For use cases. @throws Problem 'absent' where the address names no school that exists */
 			caller: (requestKey?: string) => Promise<Caller>;
+			/** The device's mark, once it was renewed in this request. */
+			keptDevice?: string;
 		}
 	}
 }

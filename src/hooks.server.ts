@@ -1,12 +1,13 @@
 import { randomUUID } from 'node:crypto';
 import type { HandleServerError, ServerInit } from '@sveltejs/kit';
 import { sequence } from '@sveltejs/kit/hooks';
-import { authHandle } from '$lib/server/http/auth';
-import { startHouse, stopHouse } from '$lib/server/http/boot';
-import { headersHandle } from '$lib/server/http/handles/headers';
-import { houseHandle, originHandle } from '$lib/server/http/handles/house';
-import { limitsHandle } from '$lib/server/http/handles/limits';
-import { schoolHandle } from '$lib/server/http/handles/school';
+import { authHandle } from '$lib/server/http/auth/auth-handle';
+import { house, startHouse, stopHouse } from '$lib/server/http/boot';
+import { bodyLimitHandle } from '$lib/server/http/handles/body-limit';
+import { localsHandle } from '$lib/server/http/handles/locals';
+import { ownHostHandle } from '$lib/server/http/handles/own-host';
+import { requestLogHandle } from '$lib/server/http/handles/request-log';
+import { securityHeadersHandle } from '$lib/server/http/handles/security-headers';
 
 export const init: ServerInit = async () => {
 	await startHouse();
@@ -15,17 +16,20 @@ export const init: ServerInit = async () => {
 };
 
 export const handle = sequence(
-	houseHandle,
-	originHandle,
-	headersHandle,
-	limitsHandle,
-	schoolHandle,
+	requestLogHandle(house),
+	securityHeadersHandle(house),
+	ownHostHandle(house),
+	bodyLimitHandle,
+	localsHandle(house),
 	authHandle
 );
 
+/** What nobody expected: noted under a number that the person can name. */
 export const handleError: HandleServerError = ({ error, event, status }) => {
+	if (status === 404) return { message: 'There is no page at this address.' };
+	if (status < 500) return { message: 'This request cannot be taken as it is.' };
 	const id = randomUUID();
-	if (status === 404) return { message: 'There is no page at this address.', id };
-	event.locals.house?.log.error({ err: error, id, path: event.url.pathname }, 'unexpected');
+	const { requestId } = event.locals;
+	house().log.error({ err: error, id, requestId, route: event.route.id }, 'unexpected');
 	return { message: 'Something went wrong here. It was noted under the number below.', id };
 };

@@ -34,7 +34,10 @@ const staff = ['instructor', 'verifier', 'admin'] as const;
 /** The one table of who may do what. DEVELOPERS.md prints it and a test holds the two together. */
 export const policy: { readonly [A in Action]: Rule<A> } = {
 	'site:read': anyone,
+	'session:ask': anyone,
+	'session:open': system,
 	'account:own': { who: ['signed-in'] },
+	'password:reset': anyone,
 	'school:found': anyone,
 	'school:read': { who: ['student', ...staff] },
 
@@ -96,6 +99,7 @@ export const policy: { readonly [A in Action]: Rule<A> } = {
 	'mail:read': { who: ['admin'] },
 	'ledger:read': { who: ['verifier', 'admin'] },
 	'api-token:manage': { who: ['admin'] },
+	'role:accept': anyone,
 
 	'system:run': system
 };

@@ -9,7 +9,10 @@ type Marked = Owned & { markerIds: readonly string[] };
 
 export type Subjects = {
 	'site:read': object;
+	'session:ask': object;
+	'session:open': object;
 	'account:own': { accountId: string };
+	'password:reset': object;
 	'school:found': object;
 	'school:read': School;
 
@@ -63,6 +66,7 @@ export type Subjects = {
 	'mail:read': School;
 	'ledger:read': School;
 	'api-token:manage': School;
+	'role:accept': object;
 
 	'system:run': object;
 };

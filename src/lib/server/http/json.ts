@@ -2,6 +2,7 @@ import { json, type RequestEvent } from '@sveltejs/kit';
 import { isUlid } from '$lib/domain/ids';
 import { inputProblem, Problem } from '$lib/domain/problem';
 import type { Caller } from '../services/use-case';
+import { isTooLarge } from './form';
 import { problemResponse } from './problem';
 
 type UseCase<Out> = (caller: Caller, input: unknown) => Promise<Out>;
@@ -65,7 +66,10 @@ export async function demandOrigin(event: RequestEvent): Promise<void> {
 }
 
 async function readBody(event: RequestEvent): Promise<Record<string, unknown>> {
-	const text = await event.request.text();
+	const text = await event.request.text().catch((error: unknown) => {
+		if (isTooLarge(error)) throw new Problem('too-large', 'Send at most 512 kB at once.');
+		throw error;
+	});
 	try {
 		const body: unknown = JSON.parse(text);
 		if (body && typeof body === 'object' && !Array.isArray(body))

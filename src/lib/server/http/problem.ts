@@ -43,7 +43,7 @@ export function problemResponse(event: RequestEvent, problem: Problem): Response
 		},
 		{
 			status,
-			headers: { 'content-type': 'application/problem+json', ...waitHeader(problem) }
+			headers: { 'content-type': 'application/problem+json', ...waitHeader(problem, event.locals.house.now().getTime()) }
 		}
 	);
 }
@@ -57,9 +57,9 @@ export function pageProblem(event: RequestEvent, problem: Problem): never {
 	error(statusOf[problem.code], { message: wordsFor(event, problem) });
 }
 
-function waitHeader(problem: Problem): Record<string, string> {
+function waitHeader(problem: Problem, nowMs: number): Record<string, string> {
 	const until = problem.parameters.until;
 	if (problem.code !== 'too-many' || !(until instanceof Date)) return {};
-	const seconds = Math.max(1, Math.ceil((until.getTime() - Date.now()) / 1000));
+	const seconds = Math.max(1, Math.ceil((until.getTime() - nowMs) / 1000));
 	return { 'retry-after': String(seconds) };
 }

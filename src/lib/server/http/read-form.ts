@@ -1,24 +1,32 @@
-/** Never sent back into a page after an error. */
-const secret = /password|token|secret|card/i;
+/** Never sent back into a page after an error, and never kept with a request key. */
+const secret = /password|^current$|token|secret/i;
 
 /**
- * A form as plain data: `rows[0].level` becomes nested, a name that comes twice a list. Files are
- * left out: they go through upload routes.
+ * A form as plain data: `rows[0].level` becomes nested, a name that ends in `[]` is a list
+ * always, another that comes twice a list too. A file (a roster as CSV) is taken as its text;
+ * what is larger goes through upload routes.
  */
-export function readForm(form: FormData): { values: Record<string, unknown>; requestKey?: string } {
-	const values: Record<string, unknown> = Object.create(null) as Record<string, unknown>;
+export async function readForm(
+	form: FormData
+): Promise<{ values: Record<string, unknown>; requestKey?: string }> {
+	const values: Record<string, unknown> = {};
 	let requestKey: string | undefined;
 	for (const [name, value] of form.entries()) {
-		if (typeof value !== 'string') continue;
-		if (name === 'requestKey') requestKey = value;
-		else place(values, pathOf(name), value);
+		if (typeof value !== 'string' && value.size === 0) continue; // a file field left empty
+		const text = typeof value === 'string' ? value : await value.text();
+		if (name === 'requestKey') requestKey = text;
+		else place(values, pathOf(name), text, name.endsWith('[]'));
 	}
-	return { values: JSON.parse(JSON.stringify(values)) as Record<string, unknown>, requestKey };
+	return { values, requestKey };
 }
 
-/** What the page may show again after an error: no secrets. */
+/** What the page may show again after an error. */
 export function withoutSecrets(values: Record<string, unknown>): Record<string, unknown> {
 	return Object.fromEntries(Object.entries(values).filter(([name]) => !secret.test(name)));
+}
+
+export function holdsSecret(values: Record<string, unknown>): boolean {
+	return Object.keys(values).some((name) => secret.test(name));
 }
 
 function pathOf(name: string): string[] {
@@ -28,21 +36,19 @@ function pathOf(name: string): string[] {
 	return parts;
 }
 
-function place(target: Record<string, unknown>, path: string[], value: string): void {
-	const [head = 'form', ...rest] = path;
-	if (rest.length === 0) {
-		const held = target[head];
-		target[head] =
-			held === undefined
-				? value
-				: Array.isArray(held)
-					? [...(held as unknown[]), value]
-					: [held, value];
-		return;
-	}
-	const next = rest[0] ?? '';
-	const index = /^\d{1,3}$/.test(next);
-	target[head] ??= index ? [] : {};
-	const inner = target[head];
-	if (inner && typeof inner === 'object') place(inner as Record<string, unknown>, rest, value);
+function place(
+	target: Record<string, unknown>,
+	[head = 'form', ...rest]: string[],
+	value: string,
+	isList: boolean
+): void {
+	const held = target[head];
+	if (rest.length > 0) {
+		const inner = held ?? (/^\d{1,3}$/.test(rest[0] ?? '') ? [] : {});
+		target[head] = inner;
+		if (typeof inner === 'object' && inner !== null)
+			place(inner as Record<string, unknown>, rest, value, isList);
+	} else if (Array.isArray(held)) held.push(value);
+	else if (held === undefined) target[head] = isList ? [value] : value;
+	else target[head] = [held, value];
 }

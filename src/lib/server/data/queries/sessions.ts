@@ -1,6 +1,6 @@
 import type { Actor, Membership, Role } from '$lib/domain/actor';
-import { apiTokens, sessions } from '../models';
-import { find, remove, select, sql, update } from '../rows';
+import { sessions } from '../models';
+import { remove, select, sql, update } from '../rows';
 import { acrossSchools, type Scope } from '../scope';
 import { tokenHash } from './tokens';
 
@@ -53,13 +53,6 @@ function membership(row: Row): Membership {
 	};
 }
 
-export async function actorOfScript(scope: Scope, token: string): Promise<Actor | undefined> {
-	const found = await find(acrossSchools(scope), apiTokens, { tokenHash: tokenHash(token) });
-	if (!found || found.revokedAt !== null) return undefined;
-	const { id, schoolId, scopes } = found;
-	return { kind: 'script', tokenId: id, schoolId, scopes };
-}
-
 export function sessionsOf(scope: Scope, accountId: string, at: Date) {
 	return select(
 		acrossSchools(scope),
@@ -67,10 +60,6 @@ export function sessionsOf(scope: Scope, accountId: string, at: Date) {
 		{ accountId, expiresAt: { above: at.toISOString() } },
 		{ order: [['seenAt', 'desc']] }
 	);
-}
-
-export function sessionWithToken(scope: Scope, token: string) {
-	return find(acrossSchools(scope), sessions, { tokenHash: tokenHash(token) });
 }
 
 export function touchSession(scope: Scope, id: string, at: Date) {

@@ -1,7 +1,8 @@
 import { z } from 'zod';
 import { anyone, type Actor } from '$lib/domain/actor';
 import { Problem } from '$lib/domain/problem';
-import { actorOfScript, actorOfSession, touchSession } from '../../data/queries/sessions';
+import { actorOfBearer } from '../../data/queries/api-tokens';
+import { actorOfSession, touchSession } from '../../data/queries/sessions';
 import { readCase, writeCase } from '../use-case';
 
 const secret = z.string().min(20).max(200);
@@ -25,8 +26,9 @@ export const whoHoldsApiToken = readCase({
 	input: z.object({ token: secret }),
 	subject: () => Promise.resolve({}),
 	async run({ scope, input }): Promise<Actor> {
-		const actor = await actorOfScript(scope, input.token);
-		if (!actor) throw new Problem('signed-out', 'This token is not known, or was withdrawn.');
+		const actor = await actorOfBearer(scope, input.token);
+		if (actor.kind === 'anyone')
+			throw new Problem('signed-out', 'This token is not known, or was withdrawn.');
 		return actor;
 	}
 });

@@ -1,4 +1,5 @@
 import { system } from '$lib/domain/actor';
+import { sendAccountLink } from '../../services/accounts/send-account-link';
 import { proposeAward } from '../../services/awards/propose-award';
 import { settlePayment } from '../../services/cohorts/settle-payment';
 import type { House } from '../../services/house';
@@ -18,6 +19,7 @@ export type Handler = (
 export const handlers: Record<string, Handler> = {
 	'send-mail': sendMail,
 	'sign-ledger-heads': signLedgerHeads,
+	'send-account-link': asSystem(sendAccountLink),
 	'settle-payment': asSystem(settlePayment),
 	'copy-photograph': asSystem(copyPhotograph),
 	'propose-award': asSystem(proposeAward),
