@@ -9,7 +9,7 @@ export type Listing<T extends Table> = {
 	limit?: number;
 	offset?: number;
 };
-type NewRow<T extends Table> = Omit<RowOf<T>, 'schoolId'> & { schoolId?: string };
+type NewRow<T extends Table> = Omit<RowOf<T>, 'schoolId'> & { schoolId?: string | null };
 
 /** Rows of one table as plain objects, always within the scope's school. */
 export async function select<T extends Table>(
