@@ -1,0 +1,4 @@
+import { runAsChild } from '../as-child.js';
+import { startFakeTill } from './fake-till.js';
+
+runAsChild(startFakeTill);
