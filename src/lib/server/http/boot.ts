@@ -14,7 +14,7 @@ import { makeLog } from '../log/log';
 import { bringContentUpToDate } from '../services/courses/take-course';
 import { firstSchoolLink } from '../services/accounts/first-school';
 import type { House } from '../services/house';
-import { seedDemo } from '../data/seeds/demo';
+import { seedDemo } from '../demo/seed-demo';
 import { startWorker, type Worker } from '../worker/loop';
 
 let built: House | undefined;

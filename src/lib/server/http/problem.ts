@@ -43,7 +43,10 @@ export function problemResponse(event: RequestEvent, problem: Problem): Response
 		},
 		{
 			status,
-			headers: { 'content-type': 'application/problem+json', ...waitHeader(problem, event.locals.house.now().getTime()) }
+			headers: {
+				'content-type': 'application/problem+json',
+				...waitHeader(problem, event.locals.house.now().getTime())
+			}
 		}
 	);
 }
