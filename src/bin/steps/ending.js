@@ -1,7 +1,8 @@
 /**
- * Runs `end` once, when somebody asks this process to stop: Ctrl-C, SIGTERM,
- * or the death of the npm that started it. npm passes signals on only while a plain `sh` lies
- * between, and cannot when it is killed outright; its death shows as a new parent.
+ * Runs `end` once, when somebody asks this process to stop: Ctrl-C, SIGTERM, or the death of the
+ * npm that started it, which shows as a new parent. The scripts in package.json begin with `exec`:
+ * the shell that npm starts would otherwise lie between, die of the signal that npm passes on,
+ * and npm would be gone before an open request is finished.
  * @param {() => Promise<void>} end
  */
 export function whenAsked(end) {
