@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { hasRole } from '$lib/domain/actor';
 import type { Course } from '$lib/domain/courses/schema';
 import { minutesOfCohort } from '../../data/queries/bench-hours';
 import { findCohort, listCohorts } from '../../data/queries/cohorts';
@@ -23,7 +24,7 @@ export const readProgress = readCase({
 		const cohort = await findCohort(scope, input.cohortId);
 		return cohort && { schoolId: scope.schoolId, cohort };
 	},
-	async run({ scope, subject: { cohort } }) {
+	async run({ scope, actor, subject: { cohort } }) {
 		const [revision, enrolments, states, minutes] = await Promise.all([
 			revisionById(scope, cohort.courseRevisionId),
 			enrolmentsOfCohort(scope, cohort.id),
@@ -34,6 +35,8 @@ export const readProgress = readCase({
 		const minutesBy = new Map(minutes.map((one) => [one.enrolmentId, one.minutes]));
 		return {
 			cohort,
+			/** Whether the names lead to the bench hours: a courtesy, the page there asks again. */
+			entersHours: hasRole(actor, scope.schoolId, 'instructor'),
 			benchHours: course.award.benchHours,
 			steps: course.steps.map(({ key, title, kind }, index) => ({
 				key,
