@@ -1,5 +1,3 @@
-import type { Component } from 'svelte';
-
 /** The one place that globs `lessons/`: everything else asks the catalogue. */
 const raw = { query: '?raw', import: 'default', eager: true } as const;
 // A caption file must stay a file: small ones would become data: addresses, which the CSP refuses.
@@ -16,7 +14,6 @@ export const files = {
 		import: 'metadata',
 		eager: true
 	}),
-	lessonComponents: import.meta.glob<{ default: Component }>('/lessons/courses/*/*/lesson.svx'),
 	captions: import.meta.glob<string>('/lessons/courses/*/*/captions.en.vtt', raw),
 	chapters: import.meta.glob<string>('/lessons/courses/*/*/chapters.en.vtt', raw),
 	addresses: import.meta.glob<string>(

@@ -3,6 +3,7 @@ import { lessonMetadataSchema, type Cue, type LessonMetadata } from '$lib/domain
 import { readCues } from './captions';
 import { ContentFault, parsed } from './fault';
 import { files } from './files';
+import { lessonComponents } from './lesson-components';
 
 export type LessonFilm = {
 	title: string;
@@ -32,7 +33,7 @@ export function readLessons(): Lesson[] {
 	return Object.entries(files.lessonTexts).map(([file, text]) => {
 		const [, , , courseKey = '', folder = ''] = file.split('/');
 		const metadata = parsed(lessonMetadataSchema, file, files.lessonMetadata[file]);
-		const component = files.lessonComponents[file];
+		const component = lessonComponents[file];
 		if (!component) throw new ContentFault(file, 'it was not compiled');
 		return {
 			...metadata,

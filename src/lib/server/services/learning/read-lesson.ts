@@ -18,7 +18,8 @@ export const readLesson = readCase({
 		const found = await lessonStep(scope, input.enrolmentId, input.stepKey);
 		return found && { schoolId: scope.schoolId, ownerId: found.enrolment.personId, ...found };
 	},
-	async run({ scope, subject: { enrolment, course, step, revision, body } }) {
+	async run({ scope, house, subject: { enrolment, course, step, revision, body } }) {
+		const lesson = house.catalogue.lessonByKey(body.key);
 		const lessonId = revision.publicationId;
 		const [sheet, watched, reading, state] = await Promise.all([
 			newestRevision(scope, 'data-sheet', course.engine),
@@ -33,7 +34,9 @@ export const readLesson = readCase({
 		const intervals = mergeIntervals(watched?.intervals ?? []);
 		const at = course.steps.findIndex((one) => one.key === step.key);
 		return {
-			lessonKey: body.key,
+			/** Where the text's component lies; the page fetches it. */
+			file: lesson?.file ?? null,
+			filmFiles: lesson?.filmFiles ?? null,
 			title: body.title,
 			drawnBy: body.drawnBy,
 			courseTitle: course.title,

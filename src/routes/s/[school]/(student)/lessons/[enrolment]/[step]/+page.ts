@@ -1,11 +1,10 @@
 import { error } from '@sveltejs/kit';
-import { catalogue } from '$lib/content/catalogue';
+import { lessonComponents } from '$lib/content/lesson-components';
 import type { PageLoad } from './$types';
 
 /** The lesson's text is a component of the build; its values and what was watched come with the data. */
 export const load: PageLoad = async ({ data }) => {
-	const lesson = catalogue().lessonByKey(data.lessonKey);
-	if (!lesson) error(404, { message: 'The text of this lesson is not here.' });
-	const { filmFiles } = lesson;
-	return { ...data, Text: await lesson.load(), filmFiles };
+	const component = data.file === null ? undefined : lessonComponents[data.file];
+	if (!component) error(404, { message: 'The text of this lesson is not here.' });
+	return { ...data, Text: (await component()).default };
 };
