@@ -13,14 +13,22 @@ export type FormFault = {
 	fields: FieldProblems;
 	words: string;
 };
-export type FormDone = { form: string; saved: true } & Record<string, unknown>;
-type Next = string | Record<string, unknown> | undefined;
+/** What a page reads of a fault is there as well, and empty: a page need not tell the two apart. */
+export type FormDone = {
+	form: string;
+	saved: true;
+	values?: undefined;
+	fields?: undefined;
+	words?: undefined;
+};
+type Next<Extra> = string | undefined | Extra;
+type Answer<Extra> = Promise<ActionFailure<FormFault & Partial<Extra>> | (FormDone & Extra)>;
 
-export type FormOptions<Out> = {
+export type FormOptions<Out, Extra extends object> = {
 	/** What the address says (ids), laid over what the form says. */
 	extra?: (event: RequestEvent) => Record<string, unknown>;
 	/** Where to go next (a path), or data for the page. */
-	done?: (answer: Out, event: RequestEvent) => Next | Promise<Next>;
+	done?: (answer: Out, event: RequestEvent) => Next<Extra> | Promise<Next<Extra>>;
 	/** Off where the answer is a secret shown once: an answer that is kept could be read again. */
 	keyed?: boolean;
 };
@@ -30,12 +38,12 @@ export type FormOptions<Out> = {
  * in the form makes a second press of the button harmless. A form with a password carries no
  * key: what is stored with one would be a quick hash of it.
  */
-export function formAction<Out>(
+export function formAction<Out, Extra extends object = object>(
 	useCase: (caller: Caller, input: unknown) => Promise<Out>,
-	{ extra = () => ({}), done = () => undefined, keyed = true }: FormOptions<Out> = {}
+	{ extra = () => ({}), done = () => undefined, keyed = true }: FormOptions<Out, Extra> = {}
 ) {
-	return (event: RequestEvent): Promise<ActionFailure<FormFault> | FormDone> =>
-		answerForm(event, useCase.name, async ({ values, requestKey }) => {
+	return (event: RequestEvent): Answer<Extra> =>
+		answerForm<Extra>(event, useCase.name, async ({ values, requestKey }) => {
 			const key = keyed && !holdsSecret(values) ? requestKey : undefined;
 			const answer = await useCase(await event.locals.caller(key), { ...values, ...extra(event) });
 			return done(answer, event);
@@ -45,23 +53,23 @@ export function formAction<Out>(
 export type Sent = { values: Record<string, unknown>; requestKey: string | undefined };
 
 /** The same for what is more than one use case, such as a sign-in through Auth.js. */
-export async function answerForm(
+export async function answerForm<Extra extends object = object>(
 	event: RequestEvent,
 	form: string,
-	work: (sent: Sent) => Promise<Next>
-): Promise<ActionFailure<FormFault> | FormDone> {
+	work: (sent: Sent) => Promise<Next<Extra>>
+): Answer<Extra> {
 	let values: Record<string, unknown> = {};
-	let next: Next;
+	let next: Next<Extra>;
 	try {
 		const sent = await readForm(await formOf(event));
 		values = sent.values;
 		const requestKey = sent.requestKey && isUlid(sent.requestKey) ? sent.requestKey : undefined;
 		next = await work({ values, requestKey });
 	} catch (problem) {
-		return formFault(event, problem, values, form);
+		return formFault(event, problem, values, form) as ActionFailure<FormFault & Partial<Extra>>;
 	}
 	if (typeof next === 'string') redirect(303, next);
-	return { form, saved: true, ...next };
+	return { form, saved: true, ...next } as FormDone & Extra;
 }
 
 /** @throws what is no expected problem, and what only another page can answer */

@@ -1,5 +1,6 @@
 import { error, json, redirect, type RequestEvent } from '@sveltejs/kit';
-import { Problem, wordsOf, type ProblemCode } from '$lib/domain/problem';
+import type { Problem } from '$lib/domain/problem';
+import { wordsOf, type ProblemCode } from '$lib/domain/problem';
 
 /** The one table from a problem's code to HTTP's status. */
 export const statusOf: Record<ProblemCode, number> = {
