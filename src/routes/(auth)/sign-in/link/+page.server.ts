@@ -1,4 +1,3 @@
-import { z } from 'zod';
 import { emailAddress } from '$lib/domain/accounts/email';
 import { inputProblem } from '$lib/domain/problem';
 import { askForSignInLink } from '$lib/server/http/auth/ask-auth';
