@@ -91,10 +91,10 @@ await carryOut(async () => {
 
 /** The settings of a server that runs beside must not reach the tests. */
 function ownEnvironment() {
-	const env = { ...process.env, FORCE_COLOR: process.stdout.isTTY ? '1' : '0' };
+	const env = { ...process.env };
 	for (const key of Object.keys(env))
 		if (
-			/^(HOST|PORT|ORIGIN|DATA_DIR|DEMO|WORKER|NODE_ENV|AUTH_SECRET|MAIL.*|SMTP_.*|STRIPE_.*|TILL_.*|ADDRESS_HEADER|XFF_DEPTH|LOG_LEVEL|NO_COLOR)$/.test(
+			/^(HOST|PORT|ORIGIN|DATA_DIR|DEMO|WORKER|NODE_ENV|AUTH_SECRET|MAIL.*|SMTP_.*|STRIPE_.*|TILL_.*|ADDRESS_HEADER|XFF_DEPTH|LOG_LEVEL)$/.test(
 				key
 			)
 		)

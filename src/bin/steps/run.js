@@ -15,7 +15,7 @@ export function run(command, words, { env = process.env, quiet = false } = {}) {
 	return new Promise((resolve, reject) => {
 		const child = spawn(command, words, {
 			cwd: project,
-			env,
+			env: quiet ? { ...env, NO_COLOR: '1', FORCE_COLOR: undefined } : env,
 			stdio: quiet ? ['ignore', 'pipe', 'pipe'] : 'inherit'
 		});
 		let output = '';
