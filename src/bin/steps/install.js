@@ -8,15 +8,16 @@ import { say, seconds, Stop } from './say.js';
 const stamp = inProject('node_modules', '.installed-from');
 const driver = inProject('node_modules', 'sqlite3', 'build', 'Release', 'node_sqlite3.node');
 
-/** Installs from the lock file when node_modules is missing or was made from another one. */
+/** Installs from the lock file when node_modules is missing, or was made from another or elsewhere. */
 export async function install() {
-	const wanted = fingerprint(
-		['package.json', 'package-lock.json'],
-		[process.version, process.platform, process.arch]
-	);
-	if (existsSync(stamp) && readFileSync(stamp, 'utf8') === wanted && existsSync(driver)) return;
-	if (!agreesWithLock() || !existsSync(driver)) await installFromLock();
-	writeFileSync(stamp, wanted);
+	const lock = fingerprint(['package.json', 'package-lock.json'], []);
+	// The version of Node's binary interface: a new patch of Node needs no new install.
+	const machine = [process.platform, process.arch, process.versions.modules].join(' ');
+	const [madeFrom, madeOn] = existsSync(stamp) ? readFileSync(stamp, 'utf8').split('\n') : [];
+	const fits = madeOn === undefined || madeOn === machine;
+	const current = fits && (madeFrom === lock || agreesWithLock()) && existsSync(driver);
+	if (!current) await installFromLock();
+	if (!current || madeFrom !== lock) writeFileSync(stamp, `${lock}\n${machine}`);
 }
 
 async function installFromLock() {
