@@ -1,4 +1,4 @@
-import type { Outcome } from '$lib/kernel/outcome';
+import { cannot, type Outcome } from '$lib/kernel/outcome';
 
 /**
  * What a question may ask of one revision of a data sheet. `domain/data-sheets` gives it;
@@ -46,4 +46,12 @@ export type SheetFigures = {
 	figure(key: string): Outcome<SheetFigure>;
 	pattern(key: string): Outcome<SheetPattern>;
 	tightening(key: string): Outcome<SheetTightening>;
+};
+
+/** For a question that names no data sheet: asking for a figure is then the author's slip. */
+export const noSheet: SheetFigures = {
+	title: 'no data sheet',
+	figure: (key) => cannot(`the question names no data sheet to find ${key} in`),
+	pattern: (key) => cannot(`the question names no data sheet to find ${key} in`),
+	tightening: (key) => cannot(`the question names no data sheet to find ${key} in`)
 };

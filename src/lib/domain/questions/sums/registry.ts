@@ -1,14 +1,15 @@
-import { displacementParameters } from './displacement';
-import { fitClearanceParameters } from './fit-clearance';
-import { oilClearanceParameters } from './oil-clearance';
-import { outOfRoundParameters } from './out-of-round';
-import { ringGapParameters } from './ring-gap';
-import { sheetValueParameters } from './sheet-value';
-import { stageTurnParameters } from './stage-turn';
-import { taperParameters } from './taper';
-import { torqueWithExtensionParameters } from './torque-with-extension';
-import { valveShimParameters } from './valve-shim';
-import { wearParameters } from './wear';
+import { displacement } from './displacement';
+import { fitClearance } from './fit-clearance';
+import { oilClearance } from './oil-clearance';
+import { outOfRound } from './out-of-round';
+import { ringGap } from './ring-gap';
+import { sheetValue } from './sheet-value';
+import { stageTurn } from './stage-turn';
+import type { AnySum } from './sum';
+import { taper } from './taper';
+import { torqueWithExtension } from './torque-with-extension';
+import { valveShim } from './valve-shim';
+import { wear } from './wear';
 
 export const sumNames = [
 	'displacement',
@@ -25,16 +26,17 @@ export const sumNames = [
 ] as const;
 export type SumName = (typeof sumNames)[number];
 
-export const sums = {
-	displacement: { parameters: displacementParameters },
-	'fit-clearance': { parameters: fitClearanceParameters },
-	'oil-clearance': { parameters: oilClearanceParameters },
-	'out-of-round': { parameters: outOfRoundParameters },
-	'ring-gap': { parameters: ringGapParameters },
-	'sheet-value': { parameters: sheetValueParameters },
-	'stage-turn': { parameters: stageTurnParameters },
-	taper: { parameters: taperParameters },
-	'torque-with-extension': { parameters: torqueWithExtensionParameters },
-	'valve-shim': { parameters: valveShimParameters },
-	wear: { parameters: wearParameters }
-} satisfies Record<SumName, unknown>;
+/** One line a sum. Each draws what could be read at a bench and has the kernel work it. */
+export const sums: Record<SumName, AnySum> = {
+	displacement: displacement as AnySum,
+	'fit-clearance': fitClearance as AnySum,
+	'oil-clearance': oilClearance as AnySum,
+	'out-of-round': outOfRound as AnySum,
+	'ring-gap': ringGap as AnySum,
+	'sheet-value': sheetValue as AnySum,
+	'stage-turn': stageTurn as AnySum,
+	taper: taper as AnySum,
+	'torque-with-extension': torqueWithExtension as AnySum,
+	'valve-shim': valveShim as AnySum,
+	wear: wear as AnySum
+};
