@@ -12,6 +12,7 @@ import { accounts, requestKeys } from '$lib/server/data/models';
 import { count, update } from '$lib/server/data/rows';
 import { acrossSchools } from '$lib/server/data/scope';
 import { createApiToken } from '$lib/server/services/people/api-tokens';
+import { readPeople } from '$lib/server/services/people/read-people';
 import { readCase, writeCase } from '$lib/server/services/use-case';
 import { makeEvent, thrown, type Asked, type Jar } from '../support/event';
 import { makeHouse, type TestHouse, type TestPerson } from '../support/house';
@@ -257,6 +258,8 @@ describe('the JSON interface', () => {
 		const authorization = `Bearer ${bearer}`;
 		const event = await call({ jar: new Map(), headers: { authorization } });
 		expect(await event.locals.actor()).toMatchObject({ kind: 'script', scopes: ['progress'] });
+		const { tokens } = await readPeople(caller, {});
+		expect(tokens).toMatchObject([{ lastUsedAt: house.now().toISOString() }]);
 		const answer = await write({ ...json, authorization }, good(), { jar: new Map() });
 		expect(answer.status, 'its scope does not reach so far').toBe(404);
 		const invented = await call({ headers: { authorization: `Bearer rl_${'x'.repeat(43)}` } });

@@ -87,9 +87,9 @@ describe('a body', () => {
 
 	it('that says nothing, or too little, is stopped while it is read', async () => {
 		const long = () => dripping(bodyBytesAtMost + 1);
-		await expect(post(0, { body: long() })).rejects.toThrow(/512 kB/);
+		await expect(post(0, { body: long() })).rejects.toMatchObject({ status: 413 });
 		const headers = { 'content-length': '10' };
-		await expect(post(0, { body: long(), headers })).rejects.toThrow(/512 kB/);
+		await expect(post(0, { body: long(), headers })).rejects.toMatchObject({ status: 413 });
 	});
 
 	it('of an upload route streams past the limit', async () => {

@@ -1,12 +1,13 @@
 import { afterEach, beforeEach, describe, expect, it } from 'vitest';
 import type { Actor } from '$lib/domain/actor';
-import { mails, sessions } from '$lib/server/data/models';
-import { count, select } from '$lib/server/data/rows';
+import { mails, sessions, tokens } from '$lib/server/data/models';
+import { count, insert, select } from '$lib/server/data/rows';
 import {
 	endOneSession,
 	endOtherSessions,
 	endSessionWithToken
 } from '$lib/server/services/accounts/end-sessions';
+import { forgetExpired } from '$lib/server/services/accounts/forget-expired';
 import { openSession, sessionHeldForMs } from '$lib/server/services/accounts/open-session';
 import { readAccount } from '$lib/server/services/accounts/read-account';
 import { noteSessionSeen, whoHoldsSession } from '$lib/server/services/accounts/who-asks';
@@ -89,6 +90,20 @@ describe('a session', () => {
 		const other = listed.find((one) => !one.isThis);
 		await endOneSession(await as('desk'), { sessionId: other?.id });
 		expect((await who('phone-again')).kind).toBe('anyone');
+		expect((await who('desk')).kind).toBe('account');
+	});
+
+	it('that has ended is cleared away, one that stands is not', async () => {
+		await open('phone');
+		house.passMs(sessionHeldForMs);
+		await open('desk');
+		await house.lay((scope) => {
+			const row = { purpose: 'sign-in' as const, identifier: 'x', createdAt: '2026' };
+			return insert(scope, tokens, { ...row, tokenHash: 'x', expiresAt: '2026-03-03' });
+		});
+		await forgetExpired(asSystem(house), {});
+		expect(await count(house.look, sessions)).toBe(1);
+		expect(await count(house.look, tokens)).toBe(0);
 		expect((await who('desk')).kind).toBe('account');
 	});
 

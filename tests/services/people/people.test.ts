@@ -1,4 +1,5 @@
 import { afterEach, beforeEach, describe, expect, it } from 'vitest';
+import { lifetimes } from '$lib/domain/accounts/lifetimes';
 import { scopesInPolicy, scriptScopes } from '$lib/domain/access/script-scopes';
 import { accounts, ledgerEntries, mails, people, sessions } from '$lib/server/data/models';
 import { membershipsOf } from '$lib/server/data/queries/schools';
@@ -7,11 +8,7 @@ import { whoHoldsApiToken } from '$lib/server/services/accounts/who-asks';
 import { acceptRole, readRoleInvitation } from '$lib/server/services/people/accept-role';
 import { createApiToken, withdrawApiToken } from '$lib/server/services/people/api-tokens';
 import { changeRoles } from '$lib/server/services/people/change-roles';
-import {
-	inviteToRole,
-	roleInvitationHeldForDays,
-	withdrawRoleInvitation
-} from '$lib/server/services/people/invite-to-role';
+import { inviteToRole, withdrawRoleInvitation } from '$lib/server/services/people/invite-to-role';
 import { readPeople } from '$lib/server/services/people/read-people';
 import { setExtraTime } from '$lib/server/services/people/set-extra-time';
 import { callerAs, makeHouse, type TestHouse, type TestPerson } from '../../support/house';
@@ -124,10 +121,8 @@ describe('a token for scripts', () => {
 		const wanted = { name: 'Register export', scopes: ['progress'] };
 		const { id, bearer } = await createApiToken(await admin.caller(), wanted);
 		expect(await whoHoldsApiToken(callerAs(house), { token: bearer })).toEqual({
-			kind: 'script',
-			tokenId: id,
-			schoolId: school,
-			scopes: ['progress']
+			actor: { kind: 'script', tokenId: id, schoolId: school, scopes: ['progress'] },
+			lastUsedAt: null
 		});
 		const [rows] = await house.database.sequelize.query('SELECT * FROM api_tokens');
 		expect(JSON.stringify(rows)).not.toContain(bearer);
@@ -217,7 +212,7 @@ describe('an invitation to work in the school', () => {
 		house.passMs(1);
 		await invite(email);
 		const third = await linkFor(email);
-		house.passMs(roleInvitationHeldForDays * 24 * 3600 * 1000);
+		house.passMs(lifetimes.roleInvitationDays * 24 * 3600 * 1000);
 		expect(await stands(third)).toBe(false);
 		expect(await count(house.look, mails)).toBe(3);
 	});

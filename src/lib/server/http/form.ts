@@ -2,7 +2,7 @@ import { fail, redirect, type ActionFailure, type RequestEvent } from '@sveltejs
 import { isUlid } from '$lib/domain/ids';
 import { Problem, type FieldProblems } from '$lib/domain/problem';
 import type { Caller } from '../services/use-case';
-import { BodyTooLarge } from './handles/body-limit';
+import { isTooLarge } from './handles/body-limit';
 import { pageProblem, statusOf, wordsFor } from './problem';
 import { holdsSecret, readForm, withoutSecrets } from './read-form';
 
@@ -98,11 +98,4 @@ async function formOf(event: RequestEvent): Promise<FormData> {
 			throw new Problem('too-large', 'This is more than 512 kB. Send it in smaller parts.');
 		throw new Problem('input', 'The form arrived incomplete. Send it again.');
 	}
-}
-
-/** The reader of a body wraps what stopped the body. */
-export function isTooLarge(error: unknown): boolean {
-	return (
-		error instanceof BodyTooLarge || (error instanceof Error && error.cause instanceof BodyTooLarge)
-	);
 }

@@ -2,7 +2,7 @@ import { json, type RequestEvent } from '@sveltejs/kit';
 import { isUlid } from '$lib/domain/ids';
 import { inputProblem, Problem } from '$lib/domain/problem';
 import type { Caller } from '../services/use-case';
-import { isTooLarge } from './form';
+import { isTooLarge } from './handles/body-limit';
 import { problemResponse } from './problem';
 
 type UseCase<Out> = (caller: Caller, input: unknown) => Promise<Out>;

@@ -30,6 +30,7 @@ async function dueAt(scope: ReturnType<typeof commonScope>, minute: string): Pro
 	const [day, quarter] = [minute.slice(0, 10), `${minute.slice(0, 13)}:${minute.slice(14, 15)}`];
 	const slots: Slot[] = [
 		{ kind: 'sign-ledger-heads', payload: { day }, id: `sign-ledger-heads:${day}` },
+		{ kind: 'forget-expired', payload: {}, id: `forget-expired:${day}` },
 		{ kind: 'end-overdue-sittings', payload: {}, id: `end-overdue-sittings:${minute}` }
 	];
 	// A webhook can be lost: a checkout that no word came of is asked after every ten minutes.

@@ -1,14 +1,24 @@
-import { anyone, type Actor } from '$lib/domain/actor';
+import type { Actor } from '$lib/domain/actor';
 import { apiTokens } from '../models';
 import { find, insert, select, update } from '../rows';
 import { acrossSchools, type Scope, type SchoolScope } from '../scope';
 import { tokenHash } from './tokens';
 
-/** A school's script by its bearer token; a revoked or unknown one is anybody. */
-export async function actorOfBearer(scope: Scope, token: string): Promise<Actor> {
+type ScriptActor = Extract<Actor, { kind: 'script' }>;
+
+/** A school's script by its bearer token; nobody by a revoked or unknown one. */
+export async function actorOfBearer(
+	scope: Scope,
+	token: string
+): Promise<{ actor: ScriptActor; lastUsedAt: string | null } | undefined> {
 	const row = await find(acrossSchools(scope), apiTokens, { tokenHash: tokenHash(token) });
-	if (!row || row.revokedAt) return anyone;
-	return { kind: 'script', tokenId: row.id, schoolId: row.schoolId, scopes: row.scopes };
+	if (!row || row.revokedAt) return undefined;
+	const { id: tokenId, schoolId, scopes, lastUsedAt } = row;
+	return { actor: { kind: 'script', tokenId, schoolId, scopes }, lastUsedAt };
+}
+
+export function noteApiTokenUse(scope: Scope, id: string, lastUsedAt: string) {
+	return update(acrossSchools(scope), apiTokens, { id }, { lastUsedAt });
 }
 
 export async function makeApiToken(

@@ -2,6 +2,7 @@ import type { EmailConfig } from '@auth/core/providers/email';
 import Credentials from '@auth/core/providers/credentials';
 import type { AuthConfig } from '@auth/core';
 import type { RequestEvent } from '@sveltejs/kit';
+import { lifetimes } from '$lib/domain/accounts/lifetimes';
 import { anyone } from '$lib/domain/actor';
 import { askForLink } from '../../services/accounts/ask-for-link';
 import { sessionHeldForMs } from '../../services/accounts/open-session';
@@ -91,7 +92,7 @@ function linkByMail(event: RequestEvent): EmailConfig {
 		type: 'email',
 		name: 'Link by e-mail',
 		from: event.locals.house.config.MAIL_FROM,
-		maxAge: 15 * 60,
+		maxAge: lifetimes.signInLinkMinutes * 60,
 		// Auth.js hashes token and secret together; without one, its hash is the one that we keep.
 		secret: '',
 		options: {},

@@ -1,8 +1,9 @@
 import type { Handle, RequestEvent } from '@sveltejs/kit';
-import { anyone, type Actor } from '$lib/domain/actor';
+import { anyone, system, type Actor } from '$lib/domain/actor';
 import { Problem } from '$lib/domain/problem';
 import { schoolAtAddress } from '../../services/accounts/find-school';
 import {
+	noteApiTokenUsed,
 	noteSessionSeen,
 	whoHoldsApiToken,
 	whoHoldsSession
@@ -37,14 +38,27 @@ async function whoAsks(event: RequestEvent): Promise<Actor> {
 	const { house } = event.locals;
 	const authorization = event.request.headers.get('authorization') ?? '';
 	const bearer = /^Bearer\s+(\S+)\s*$/i.exec(authorization)?.[1];
-	if (bearer && event.url.pathname.startsWith('/api/'))
-		return whoHoldsApiToken(byAnyone(house), { token: bearer });
+	if (bearer && event.url.pathname.startsWith('/api/')) return whichScript(house, bearer);
 	const token = event.cookies.get(cookieName(house.config.ORIGIN, 'session'));
 	if (!token) return anyone;
 	const { actor, seenAt } = await whoHoldsSession(byAnyone(house), { token });
-	if (seenAt !== null && house.now().getTime() - Date.parse(seenAt) > seenEveryMs)
+	if (actor.kind === 'account' && isLongAgo(house, seenAt))
 		await noteSessionSeen({ house, actor, schoolId: undefined }, {});
 	return actor;
+}
+
+async function whichScript(house: House, token: string): Promise<Actor> {
+	const { actor, lastUsedAt } = await whoHoldsApiToken(byAnyone(house), { token });
+	if (isLongAgo(house, lastUsedAt)) {
+		const { tokenId } = actor;
+		await noteApiTokenUsed({ house, actor: system, schoolId: undefined }, { tokenId });
+	}
+	return actor;
+}
+
+/** Often enough to be told apart, seldom enough to cost nothing. */
+function isLongAgo(house: House, at: string | null): boolean {
+	return at === null || house.now().getTime() - Date.parse(at) > seenEveryMs;
 }
 
 function byAnyone(house: House) {

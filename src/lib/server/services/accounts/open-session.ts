@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { addressBlock } from '$lib/domain/accounts/address-block';
 import { deviceWords } from '$lib/domain/accounts/device-words';
+import { lifetimes } from '$lib/domain/accounts/lifetimes';
 import { Problem } from '$lib/domain/problem';
 import { knownDevices, sessions } from '../../data/models';
 import { accountById } from '../../data/queries/accounts';
@@ -9,7 +10,7 @@ import { find, insert, remove, update } from '../../data/rows';
 import { acrossSchools, type CommonScope } from '../../data/scope';
 import { writeCase } from '../use-case';
 
-export const sessionHeldForMs = 30 * 24 * 3600 * 1000;
+export const sessionHeldForMs = lifetimes.sessionDays * 24 * 3600 * 1000;
 
 /**
  * Opens a session for somebody whom the edge has just recognised; only the server itself asks.

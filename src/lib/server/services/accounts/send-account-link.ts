@@ -1,9 +1,13 @@
 import { z } from 'zod';
+import { lifetimes } from '$lib/domain/accounts/lifetimes';
 import { accountByEmail } from '../../data/queries/accounts';
 import { makeToken } from '../../data/queries/tokens';
 import { writeCase } from '../use-case';
 
-export const linkHeldForMinutes = { 'sign-in': 15, password: 60 } as const;
+const heldFor = {
+	'sign-in': lifetimes.signInLinkMinutes,
+	password: lifetimes.passwordLinkMinutes
+} as const;
 const pages = { 'sign-in': 'sign-in/link', password: 'password' } as const;
 const letters = { 'sign-in': 'sign-in-link', password: 'password-reset' } as const;
 
@@ -17,7 +21,7 @@ export const sendAccountLink = writeCase({
 	async run({ scope, house, input: { email, purpose }, at, mail }) {
 		const account = await accountByEmail(scope, email);
 		if (!account) return;
-		const heldForMinutes = linkHeldForMinutes[purpose];
+		const heldForMinutes = heldFor[purpose];
 		const token = await makeToken(scope, house.chance(32), {
 			purpose,
 			identifier: email,

@@ -4,7 +4,7 @@ import { emailAddress } from '$lib/domain/accounts/email';
 import { Problem } from '$lib/domain/problem';
 import { isLoopback } from '../../config/env';
 import { accountByEmail } from '../../data/queries/accounts';
-import { forgetOldTries, forgetTries, giveTurnBack } from '../../data/queries/sign-in-tries';
+import { forgetTries, giveTurnBack } from '../../data/queries/sign-in-tries';
 import { verifyPassword } from '../../gateways/passwords/passwords';
 import type { Caller } from '../use-case';
 import { readCase, writeCase } from '../use-case';
@@ -45,8 +45,7 @@ const tryWasRight = writeCase({
 	where: 'common',
 	input: z.object({ email: emailAddress, ...tryOrigin }),
 	subject: () => Promise.resolve({}),
-	async run({ scope, house, input, at }) {
-		await forgetOldTries(scope, new Date(at.getTime() - 2 * 24 * 3600 * 1000));
+	async run({ scope, house, input }) {
 		const [address, own] = await bucketsOf(scope, house, input.email, input, 'password');
 		if (address) await giveTurnBack(scope, address.name, address.rule);
 		if (own) await forgetTries(scope, own.name);

@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { anyone, type Actor } from '$lib/domain/actor';
 import { Problem } from '$lib/domain/problem';
-import { actorOfBearer } from '../../data/queries/api-tokens';
+import { actorOfBearer, noteApiTokenUse } from '../../data/queries/api-tokens';
 import { actorOfSession, touchSession } from '../../data/queries/sessions';
 import { readCase, writeCase } from '../use-case';
 
@@ -25,11 +25,22 @@ export const whoHoldsApiToken = readCase({
 	where: 'common',
 	input: z.object({ token: secret }),
 	subject: () => Promise.resolve({}),
-	async run({ scope, input }): Promise<Actor> {
-		const actor = await actorOfBearer(scope, input.token);
-		if (actor.kind === 'anyone')
-			throw new Problem('signed-out', 'This token is not known, or was withdrawn.');
-		return actor;
+	async run({ scope, input }) {
+		const found = await actorOfBearer(scope, input.token);
+		if (!found) throw new Problem('signed-out', 'This token is not known, or was withdrawn.');
+		return found;
+	}
+});
+
+/** Notes that a token is in use: the office sees which ones are forgotten. */
+export const noteApiTokenUsed = writeCase({
+	name: 'note-api-token-used',
+	action: 'session:open',
+	where: 'common',
+	input: z.object({ tokenId: z.string() }),
+	subject: () => Promise.resolve({}),
+	async run({ scope, input, at }) {
+		await noteApiTokenUse(scope, input.tokenId, at.toISOString());
 	}
 });
 

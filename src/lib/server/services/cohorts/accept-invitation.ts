@@ -4,7 +4,7 @@ import { inputProblem, Problem } from '$lib/domain/problem';
 import { hashPassword } from '../../gateways/passwords/passwords';
 import { readToken, useToken } from '../../data/queries/tokens';
 import { enrol } from '../../data/queries/enrolments';
-import { personOfAccount } from '../../data/queries/schools';
+import { personOfAccount, schoolById } from '../../data/queries/schools';
 import { accounts, people, personRoles, rosterEntries } from '../../data/models';
 import { find, insert, update } from '../../data/rows';
 import { acrossSchools, type SchoolScope } from '../../data/scope';
@@ -69,7 +69,8 @@ export const acceptInvitation = writeCase({
 		const { schoolId } = schoolScope;
 		const data = { cohort: cohort.id, person: personId };
 		await record({ schoolId, kind: 'enrolled', subject: enrolmentId, data });
-		return { accountId, isNew: !known, schoolId };
+		const school = await schoolById(scope, schoolId);
+		return { accountId, isNew: !known, schoolId, schoolSlug: school?.slug ?? '' };
 	}
 });
 

@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { emailAddress } from '$lib/domain/accounts/email';
+import { lifetimes } from '$lib/domain/accounts/lifetimes';
 import { roles } from '$lib/domain/actor';
 import { inputProblem, Problem } from '$lib/domain/problem';
 import { accountByEmail } from '../../data/queries/accounts';
@@ -8,8 +9,6 @@ import { personOfAccount, schoolById } from '../../data/queries/schools';
 import { endTokens, makeToken } from '../../data/queries/tokens';
 import { writeCase } from '../use-case';
 import { rolesInWords } from './change-roles';
-
-export const roleInvitationHeldForDays = 14;
 
 /** Asks somebody by letter to work in the school. Nothing exists for them until they accept. */
 export const inviteToRole = writeCase({
@@ -34,7 +33,7 @@ export const inviteToRole = writeCase({
 			purpose: 'role-invitation',
 			identifier: `${scope.schoolId}:${id}`,
 			at,
-			heldForMs: roleInvitationHeldForDays * 24 * 3600 * 1000
+			heldForMs: lifetimes.roleInvitationDays * 24 * 3600 * 1000
 		});
 		await mail({
 			kind: 'role-invitation',
@@ -43,7 +42,7 @@ export const inviteToRole = writeCase({
 				name: input.name,
 				schoolName: school?.name ?? '',
 				roleWords: rolesInWords(input.roles),
-				heldForDays: roleInvitationHeldForDays
+				heldForDays: lifetimes.roleInvitationDays
 			},
 			links: { link: `${house.config.ORIGIN}/joining/${token}` }
 		});

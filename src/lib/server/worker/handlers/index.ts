@@ -1,4 +1,5 @@
 import { system } from '$lib/domain/actor';
+import { forgetExpired } from '../../services/accounts/forget-expired';
 import { sendAccountLink } from '../../services/accounts/send-account-link';
 import { proposeAward } from '../../services/awards/propose-award';
 import { settlePayment } from '../../services/cohorts/settle-payment';
@@ -20,6 +21,7 @@ export const handlers: Record<string, Handler> = {
 	'send-mail': sendMail,
 	'sign-ledger-heads': signLedgerHeads,
 	'send-account-link': asSystem(sendAccountLink),
+	'forget-expired': asSystem(forgetExpired),
 	'settle-payment': asSystem(settlePayment),
 	'copy-photograph': asSystem(copyPhotograph),
 	'propose-award': asSystem(proposeAward),
