@@ -27,9 +27,7 @@ export default ts.config(
 		languageOptions: {
 			globals: { ...globals.browser, ...globals.node },
 			parserOptions: {
-				projectService: {
-					allowDefaultProject: ['*.js', 'tailwind.config.ts', 'playwright.config.ts']
-				},
+				projectService: true,
 				tsconfigRootDir: import.meta.dirname,
 				extraFileExtensions: ['.svelte']
 			}

@@ -27,6 +27,12 @@ const config = {
 	kit: {
 		adapter: adapter({ out: process.env.RINGLAND_BUILD_OUT ?? 'build', precompress: true }),
 		alias: { $lessons: 'lessons' },
+		typescript: {
+			config: (made) => ({
+				...made,
+				include: [...made.include, '../lessons/**/*.svelte', '../*.config.ts', '../*.config.js']
+			})
+		},
 		// Style attributes and video.js need inline styles; scripts carry a nonce.
 		csp: {
 			mode: 'nonce',
