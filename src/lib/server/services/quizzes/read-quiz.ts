@@ -1,9 +1,11 @@
 import { z } from 'zod';
+import type { Course } from '$lib/domain/courses/schema';
 import { kindOf } from '$lib/domain/questions/registry';
 import { mayBegin } from '$lib/domain/quizzes/may-begin';
 import { passRuleWords, resultOf } from '$lib/domain/quizzes/result';
 import { questionCount, type Quiz } from '$lib/domain/quizzes/schema';
-import { findPerson } from '../../data/queries/schools';
+import { findEnrolment } from '../../data/queries/enrolments';
+import { findPerson, schoolById } from '../../data/queries/schools';
 import { revisionById } from '../../data/queries/publications';
 import { findSitting, responsesOfSitting, sittingsOf } from '../../data/queries/sittings';
 import { readCase } from '../use-case';
@@ -64,6 +66,33 @@ export const readQuizStep = readCase({
 	}
 });
 
+/** The frame of an open sitting; its questions come when it is opened on a device. */
+export const readOpenSitting = readCase({
+	name: 'read-open-sitting',
+	action: 'sitting:read',
+	input: z.object({ sittingId: z.string() }),
+	async subject({ scope, input }) {
+		const sitting = await findSitting(scope, input.sittingId);
+		return sitting && { schoolId: scope.schoolId, ownerId: sitting.personId, sitting };
+	},
+	async run({ scope, subject: { sitting } }) {
+		const [quiz, sheet] = await Promise.all([
+			revisionById(scope, sitting.quizRevisionId),
+			revisionById(scope, sitting.sheetRevisionId)
+		]);
+		const school = await schoolById(scope, scope.schoolId);
+		return {
+			sittingId: sitting.id,
+			state: sitting.state,
+			number: sitting.number,
+			startedAt: sitting.startedAt,
+			title: (quiz?.body as Quiz).title,
+			sheetCode: sheet?.key.toUpperCase() ?? '',
+			sheetHref: sheet ? `/s/${school?.slug}/data-sheets/${sheet.key}` : null
+		};
+	}
+});
+
 /** After handing in: response, right answer with its working, source, and where to read again. */
 export const readSittingResult = readCase({
 	name: 'read-sitting-result',
@@ -84,6 +113,11 @@ export const readSittingResult = readCase({
 			scope,
 			questions.map((one) => one.id)
 		);
+		const enrolment = await findEnrolment(scope, sitting.enrolmentId);
+		const course = enrolment && (await revisionById(scope, enrolment.courseRevisionId));
+		const steps = (course?.body as Course | undefined)?.steps ?? [];
+		const stepOf = (lesson: string) =>
+			steps.find((one) => one.kind === 'lesson' && one.ref === lesson)?.key ?? null;
 		const quiz = revision?.body as Quiz;
 		const { points, possible } = sitting;
 		const of = possible ?? questions.length;
@@ -114,7 +148,7 @@ export const readSittingResult = readCase({
 					answer: kind.answer(question.body, drawn.value),
 					working: kind.working(question.body, drawn.value),
 					source: question.source,
-					readAgain: question.readAgain
+					readAgain: { step: stepOf(question.readAgain.lesson), anchor: question.readAgain.anchor }
 				};
 			})
 		};
