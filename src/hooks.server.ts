@@ -19,8 +19,8 @@ export const handle = sequence(
 	requestLogHandle(house),
 	securityHeadersHandle(house),
 	ownHostHandle(house),
-	bodyLimitHandle,
 	localsHandle(house),
+	bodyLimitHandle,
 	authHandle
 );
 

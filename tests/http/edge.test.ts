@@ -252,6 +252,15 @@ describe('the JSON interface', () => {
 		expect([held.status, held.headers.get('retry-after')]).toEqual([429, '30']);
 	});
 
+	it('answers what nobody expected with a number, and tells nothing of it', async () => {
+		const broken = () => Promise.reject(new Error('the secret insides'));
+		const answer = await jsonRead(broken)(await call());
+		const text = await answer.text();
+		expect(answer.status).toBe(500);
+		expect(JSON.parse(text)).toMatchObject({ title: 'unexpected', id: expect.any(String) });
+		expect(text).not.toContain('insides');
+	});
+
 	it('takes a script by its token: within its scopes, without a cookie or an origin', async () => {
 		const caller = await admin.caller();
 		const { bearer } = await createApiToken(caller, { name: 'Export', scopes: ['progress'] });

@@ -83,6 +83,9 @@ describe('a body', () => {
 	it('that says it is larger is refused before it is read', async () => {
 		const headers = { 'content-length': String(bodyBytesAtMost + 1) };
 		expect((await post(10, { headers })).status).toBe(413);
+		const asked = { method: 'POST', body: 'x', headers };
+		const told = await through(bodyLimitHandle, '/api/v1/anything', asked, read);
+		expect(told.headers.get('content-type')).toBe('application/problem+json');
 	});
 
 	it('that says nothing, or too little, is stopped while it is read', async () => {

@@ -1,9 +1,9 @@
-import { json, type RequestEvent } from '@sveltejs/kit';
+import { isHttpError, isRedirect, json, type RequestEvent } from '@sveltejs/kit';
 import { isUlid } from '$lib/domain/ids';
 import { inputProblem, Problem } from '$lib/domain/problem';
 import type { Caller } from '../services/use-case';
 import { isTooLarge } from './handles/body-limit';
-import { problemResponse } from './problem';
+import { problemResponse, unexpectedResponse } from './problem';
 
 type UseCase<Out> = (caller: Caller, input: unknown) => Promise<Out>;
 
@@ -47,7 +47,8 @@ export async function answered(
 		return await work();
 	} catch (problem) {
 		if (problem instanceof Problem) return problemResponse(event, problem);
-		throw problem;
+		if (isHttpError(problem) || isRedirect(problem)) throw problem;
+		return unexpectedResponse(event, problem);
 	}
 }
 

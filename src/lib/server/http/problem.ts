@@ -1,3 +1,4 @@
+import { randomUUID } from 'node:crypto';
 import { error, json, redirect, type RequestEvent } from '@sveltejs/kit';
 import type { Problem } from '$lib/domain/problem';
 import { wordsOf, type ProblemCode } from '$lib/domain/problem';
@@ -49,6 +50,23 @@ export function problemResponse(event: RequestEvent, problem: Problem): Response
 				...waitHeader(problem, event.locals.house.now().getTime())
 			}
 		}
+	);
+}
+
+/** What nobody expected, in the same form; the log has it under the id. */
+export function unexpectedResponse(event: RequestEvent, fault: unknown): Response {
+	const id = randomUUID();
+	const { house, requestId } = event.locals;
+	house.log.error({ err: fault, id, requestId, route: event.route.id }, 'unexpected');
+	return json(
+		{
+			type: `${house.config.ORIGIN}/problems/unexpected`,
+			title: 'unexpected',
+			status: 500,
+			detail: `Something went wrong here. It was noted under ${id}.`,
+			id
+		},
+		{ status: 500, headers: { 'content-type': 'application/problem+json' } }
 	);
 }
 
