@@ -6,12 +6,13 @@ export type RailLink = { path: string; words: string };
 const byRole: Record<Role, readonly RailLink[]> = {
 	student: [
 		{ path: 'bench', words: 'Bench' },
-		{ path: 'certificates', words: 'Certificates' }
+		{ path: 'certificates', words: 'Certificates' },
+		{ path: 'data-sheets', words: 'Data sheets' }
 	],
 	instructor: [
 		{ path: 'marking', words: 'Marking' },
 		{ path: 'progress', words: 'Progress chart' },
-		{ path: 'bench-hours', words: 'Bench hours' }
+		{ path: 'data-sheets', words: 'Data sheets' }
 	],
 	verifier: [
 		{ path: 'awards', words: 'Awards' },

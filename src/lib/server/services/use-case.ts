@@ -1,6 +1,6 @@
 import { createHash } from 'node:crypto';
 import canonicalize from 'canonicalize';
-import { z } from 'zod';
+import type { z } from 'zod';
 import { may, mightEver } from '$lib/domain/access/policy';
 import type { Action, Subject } from '$lib/domain/access/subjects';
 import { membershipIn, type Actor } from '$lib/domain/actor';
