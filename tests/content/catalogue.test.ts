@@ -17,8 +17,10 @@ describe('the catalogue', () => {
 		'can draw the quiz %s many times over, with at least ten questions at Averholm',
 		(_, { questions, course }, quiz) => {
 			const pool = questions.map(({ key, outcome, kind }) => ({ key, outcome, kind }));
-			for (let i = 0; i < 50; i++) expect(drawSitting(quiz, pool, `seed-${i}`)).toMatchObject({ ok: true });
-			if (course.key === 'reading-failed-engines') expect(questionCount(quiz)).toBeGreaterThanOrEqual(10);
+			for (let i = 0; i < 50; i++)
+				expect(drawSitting(quiz, pool, `seed-${i}`)).toMatchObject({ ok: true });
+			if (course.key === 'reading-failed-engines')
+				expect(questionCount(quiz)).toBeGreaterThanOrEqual(10);
 		}
 	);
 

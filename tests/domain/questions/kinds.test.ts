@@ -10,7 +10,11 @@ const questions = catalogue().courses.flatMap(({ questions: own, sheet }) =>
 );
 const seed = fc.string({ minLength: 1, maxLength: 24 });
 
-function drawn(question: (typeof questions)[number][1], figures: (typeof questions)[number][2], from: string) {
+function drawn(
+	question: (typeof questions)[number][1],
+	figures: (typeof questions)[number][2],
+	from: string
+) {
 	const made = kindOf(question.kind).draw(question.body, from, figures);
 	if (!made.ok) throw new Error(`${question.key}: ${made.because}`);
 	return made.value;
@@ -30,7 +34,8 @@ function rightResponse(question: (typeof questions)[number][1], held: unknown): 
 		case 'tightening-order':
 			return { order: answer.order } satisfies Partial<OrderResponse>;
 		case 'number-with-unit': {
-			const [, value = '', unit = ''] = /^(\S+?)(?:\s+(.*))?$/.exec(answer.words.replace('°', ' °')) ?? [];
+			const [, value = '', unit = ''] =
+				/^(\S+?)(?:\s+(.*))?$/.exec(answer.words.replace('°', ' °')) ?? [];
 			return { value, unit };
 		}
 	}
@@ -81,7 +86,8 @@ describe.each(questions)('%s', (_, question, figures) => {
 });
 
 describe('a number', () => {
-	const [, question, figures] = questions.find(([key]) => key === 'wrench-with-straight-extension') ?? [];
+	const [, question, figures] =
+		questions.find(([key]) => key === 'wrench-with-straight-extension') ?? [];
 
 	it('is right in another unit, and a right figure in a wrong unit is told so', () => {
 		if (!question || !figures) throw new Error('the question is gone');
@@ -105,10 +111,17 @@ describe('a tightening order', () => {
 		if (!question || !figures) throw new Error('the question is gone');
 		const kind = kindOf('tightening-order');
 		const held = drawn(question, figures, 'order') as { order: string[] };
-		const mirrored = held.order.map((id) => (id.startsWith('A') ? `B${id.slice(1)}` : `A${id.slice(1)}`));
-		expect(kind.score(question.body, held, { order: mirrored })).toMatchObject({ points: 0, right: false });
+		const mirrored = held.order.map((id) =>
+			id.startsWith('A') ? `B${id.slice(1)}` : `A${id.slice(1)}`
+		);
+		expect(kind.score(question.body, held, { order: mirrored })).toMatchObject({
+			points: 0,
+			right: false
+		});
 		const [first = '', second = '', ...rest] = held.order;
 		const swapped = [first, rest[0] ?? '', second, ...rest.slice(1)];
-		expect(kind.score(question.body, held, { order: swapped }).explain).toContain('first wrong step is 2');
+		expect(kind.score(question.body, held, { order: swapped }).explain).toContain(
+			'first wrong step is 2'
+		);
 	});
 });
