@@ -94,8 +94,8 @@ describe('a number', () => {
 		const kind = kindOf('number-with-unit');
 		const held = drawn(question, figures, 'units') as { expected: { value: number } };
 		const newtonMetres = held.expected.value;
-		// 1 lbf·ft = 1.3558179483314004 N·m exactly, NIST SP 811.
-		const poundFeet = (newtonMetres / 1.3558179483314004).toFixed(2);
+		// 1 lbf·ft = 1.3558179483314 N·m exactly, NIST SP 811.
+		const poundFeet = (newtonMetres / 1.3558179483314).toFixed(2);
 		const score = (value: string, unit: string) => kind.score(question.body, held, { value, unit });
 		expect(score(poundFeet, 'lbf·ft')).toMatchObject({ right: true });
 		expect(score(newtonMetres.toFixed(1).replace('.', ','), 'N·m')).toMatchObject({ right: true });
