@@ -1,14 +1,5 @@
-import { readReady } from '$lib/server/services/schools/ready';
-import type { RequestHandler } from './$types';
+import { jsonRead } from '$lib/server/http/json';
+import { readReadiness } from '$lib/server/services/health/read-readiness';
 
-/** The database answers as well: send people here. */
-export const GET: RequestHandler = async ({ locals }) => {
-	const headers = { 'cache-control': 'no-store' };
-	try {
-		await readReady(await locals.caller(), {});
-		return new Response('ready\n', { headers });
-	} catch (error) {
-		locals.house.log.error({ err: error }, 'not ready');
-		return new Response('not ready\n', { status: 503, headers });
-	}
-};
+/** Whether to send requests here; no answer, or an error, while it starts or its database is gone. */
+export const GET = jsonRead(readReadiness);

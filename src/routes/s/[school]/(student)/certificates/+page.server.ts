@@ -1,0 +1,4 @@
+import { pageLoad } from '$lib/server/http/page';
+import { listOwnCertificates } from '$lib/server/services/awards/certificates';
+
+export const load = pageLoad(listOwnCertificates);
