@@ -65,7 +65,9 @@ it('reaches a server that listens everywhere, and asks for the address that peop
 });
 
 it('names the demo accounts only where there is a demo', () => {
-	const words = (DEMO: string) => welcome(settingsFrom({ DATA_DIR, DEMO })).join('\n');
+	const words = (DEMO: string, ORIGIN?: string) =>
+		welcome(settingsFrom({ DATA_DIR, DEMO, ORIGIN })).join('\n');
 	expect(words('on')).toContain('averholm-demo');
+	expect(words('on', 'https://ringland.example')).toContain('Demo passwords are refused');
 	expect(words('off')).not.toContain('averholm-demo');
 });

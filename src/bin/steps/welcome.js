@@ -4,6 +4,7 @@
  * @returns {string[]}
  */
 export function welcome({ host, origin, demo, mailbox, till }) {
+	const loopback = /^(localhost|127\.\d+\.\d+\.\d+|\[::1\])$/.test(new URL(origin).hostname);
 	const everywhere = ['0.0.0.0', '::'].includes(host) && origin.includes(host);
 	return [
 		'',
@@ -16,11 +17,14 @@ export function welcome({ host, origin, demo, mailbox, till }) {
 					`Till          http://127.0.0.1:${till.port}   4242 4242 4242 4242 pays, 4000 0000 0000 0002 is refused`
 				]
 			: []),
-		...(demo ? demoAccounts : []),
+		...(demo ? (loopback ? demoAccounts : ['', demoRefused]) : []),
 		...(everywhere ? [`HOST is ${host}: set ORIGIN to the address that people type.`] : []),
 		''
 	];
 }
+
+const demoRefused =
+	'Demo passwords are refused, because ORIGIN is not on this machine. Start with DEMO=off.';
 
 const demoAccounts = [
 	'',

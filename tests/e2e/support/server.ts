@@ -43,13 +43,14 @@ type Wanted = {
 
 export async function startSite({ template, dataDir, environment = {} }: Wanted): Promise<Site> {
 	const folder = dataDir ?? (await mkdtemp(join(tmpdir(), 'ringland-site-')));
-	if (template) await cp(template, folder, { recursive: true });
+	const logFile = join(folder, 'server.log');
+	const isOld = (path: string) => path === join(template ?? '', 'server.log');
+	if (template) await cp(template, folder, { recursive: true, filter: (path) => !isOld(path) });
 	const [port = 0, smtp, page, till] = await freePorts(4);
 	const settings = settingsFrom(
 		{ ...quietEnvironment(), PORT: String(port), DATA_DIR: folder, ...environment },
 		{ smtp, page, till }
 	);
-	const logFile = join(folder, 'server.log');
 	const fakes = await startFakes(settings);
 	let server: Running | undefined;
 
