@@ -39,6 +39,8 @@ const fastener = z.strictObject({
 	thread: z.strictObject({ diameterMm: z.number().positive(), pitchMm: z.number().positive() }),
 	propertyClass: z.enum(['8.8', '10.9', '12.9']),
 	lubrication: words,
+	/** Length between head and first loaded thread: with it the load after an angle can be told. */
+	gripMm: z.number().positive().optional(),
 	stages: z.array(stage).min(1),
 	/** "Use again", "new each time": what the maker says of fitting it twice. */
 	reuse: words,
