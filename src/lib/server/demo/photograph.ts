@@ -121,6 +121,6 @@ function laidOut(random: Random): string {
 function stand(random: Random): string {
 	return `<path d="M-420 -220h760l60 300h-880z" fill="url(#dark)"/><path d="M-420 80h820v130q-410 60 -820 0z" fill="#4f565b"/>
 	<path d="M-500 330h1000v40H-500zM-460 210h50v130h-50zM410 210h50v130h-50z" fill="#2f6db0" opacity=".8"/>
-	${Array.from({ length: 4 }, (_, i) => `<circle cx="${-310 + i * 210}" cy="-90" r="66" fill="#3a4045"/>`).join('')}
+	${Array.from({ length: 3 }, (_, i) => `<circle cx="${-260 + i * 240}" cy="-90" r="70" fill="#3a4045"/>`).join('')}
 	<path d="M${random.integer(-300, 200)} 190q30 90 10 150" stroke="#1b1510" stroke-width="14" fill="none" opacity=".8"/>`;
 }

@@ -1,0 +1,141 @@
+import { expect, expectAccessible, test, type Page } from './support/test';
+
+const saved = (page: Page) => page.locator('[data-save-state="saved"]');
+
+async function beginQuiz(page: Page) {
+	await page.goto('/s/averholm/bench');
+	await page.getByRole('link', { name: 'Torque and tagging' }).click();
+	await page.getByRole('button', { name: 'Begin the sitting' }).click();
+	await expect(saved(page)).toBeVisible();
+}
+
+/** Gives the first option of the first question that has options to choose one of. */
+function firstRadio(page: Page) {
+	return page.locator('main li input[type=radio]').first();
+}
+
+test('a lesson opens with its caution, and its balloons lead through it', async ({ as }) => {
+	const page = await as('student@averholm.example');
+	await page.getByRole('link', { name: 'Go on' }).click();
+	await expect(page.getByRole('heading', { level: 1 })).toBeVisible();
+	const main = page.locator('main');
+	const caution = await main.getByRole('note').first().boundingBox();
+	expect(caution?.y ?? 9999, 'the caution stands above the fold').toBeLessThan(700);
+	await page
+		.getByRole('navigation', { name: 'Parts of this lesson' })
+		.getByRole('link')
+		.nth(2)
+		.click();
+	await expect(page).toHaveURL(/#/);
+	await expectAccessible(page);
+});
+
+test('a quiz loses nothing: a closed browser, a lost network, another device', async ({
+	as,
+	openContext
+}) => {
+	const page = await as('student@averholm.example');
+	await beginQuiz(page);
+	expect(await page.locator('main ol > li').count()).toBeGreaterThanOrEqual(10);
+	await expectAccessible(page);
+
+	await firstRadio(page).check();
+	await expect(saved(page)).toBeVisible();
+	const address = page.url();
+	const order = page.getByRole('group', { name: 'Take the next bolt' });
+	await order.getByRole('button').first().click();
+	await expect(page.getByText(/^Taken: /)).toBeVisible();
+	await expect(saved(page)).toBeVisible();
+
+	await test.step('after closing and coming back', async () => {
+		await page.goto('/s/averholm/bench');
+		await page.goto(address);
+		await expect(saved(page)).toBeVisible();
+		await expect(firstRadio(page)).toBeChecked();
+		await expect(page.getByText(/^Taken: /)).toBeVisible();
+	});
+
+	await test.step('while the network is gone, and when it is back', async () => {
+		await page.context().setOffline(true);
+		await page.getByLabel('Your figure').first().fill('12,5');
+		await page.getByLabel('Your figure').first().blur();
+		await expect(page.getByText('No connection. Go on')).toBeVisible();
+		await page.context().setOffline(false);
+		await expect(saved(page)).toBeVisible({ timeout: 15_000 });
+	});
+
+	await test.step('on another device, which takes the sitting over', async () => {
+		const phone = await openContext({
+			viewport: { width: 360, height: 740 },
+			storageState: await page.context().storageState()
+		});
+		const second = await phone.newPage();
+		await second.goto(address);
+		await expect(saved(second)).toBeVisible();
+		await expect(firstRadio(second)).toBeChecked();
+		await expect(second.getByLabel('Your figure').first()).toHaveValue('12,5');
+		await second.locator('main li input[type=radio]').nth(1).check();
+		await expect(saved(second)).toBeVisible();
+
+		await page.getByLabel('Your figure').first().fill('99');
+		await page.getByLabel('Your figure').first().blur();
+		await expect(page.getByText('opened on another device')).toBeVisible();
+		await second.reload();
+		await expect(saved(second)).toBeVisible();
+		await expect(second.getByLabel('Your figure').first()).toHaveValue('12,5');
+
+		await second.getByRole('button', { name: 'Hand in' }).click();
+		await expect(second.getByRole('heading', { name: /result/ })).toBeVisible();
+		await expect(second.getByText('Working').first()).toBeVisible();
+		await expect(second.getByText('Source').first()).toBeVisible();
+		await expect(second.getByText('12,5').first()).toBeVisible();
+		await expectAccessible(second);
+		await second.getByRole('link', { name: 'The lesson, at this point' }).first().click();
+		await expect(second).toHaveURL(/\/lessons\/.*#/);
+	});
+});
+
+test('what is sent before the end holds no key', async ({ as }) => {
+	const page = await as('lwazi@averholm.example');
+	const bodies: string[] = [];
+	page.on('response', (response) => {
+		if (
+			!response
+				.request()
+				.resourceType()
+				.match(/document|fetch|xhr/)
+		)
+			return;
+		void response.text().then(
+			(text) => bodies.push(text),
+			() => undefined
+		);
+	});
+	await page.goto('/s/averholm/bench');
+	const open = page.getByRole('link', { name: 'Clearance and cause' });
+	await open.click();
+	await page
+		.locator('main')
+		.getByRole('link', { name: /open sitting/ })
+		.or(page.getByRole('button', { name: 'Begin the sitting' }))
+		.first()
+		.click();
+	await expect(page.locator('main h1')).toBeVisible();
+	await page.waitForLoadState('networkidle');
+	const sent = bodies.join('\n');
+	expect(sent).not.toMatch(/"(seed|right|expected|printedOrder|because)"/);
+});
+
+test('the programs that the browser loads hold no key of a question', async () => {
+	const { readdir, readFile } = await import('node:fs/promises');
+	const files = (await readdir('build/client/_app/immutable', { recursive: true })).filter((name) =>
+		name.endsWith('.js')
+	);
+	expect(files.length).toBeGreaterThan(10);
+	for (const name of files) {
+		const text = await readFile(`build/client/_app/immutable/${name}`, 'utf8');
+		// Words that only the questions' keys hold.
+		expect(text, name).not.toContain('A bolt pulled apart is drawn to a waist');
+		expect(text, name).not.toContain('rod-bolts-once');
+	}
+});
