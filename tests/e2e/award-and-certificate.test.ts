@@ -14,7 +14,7 @@ test('an award is decided by a verifier, printed, checked by anyone, and withdra
 	await verifier.getByLabel('Decline for now').check();
 	await verifier.getByRole('button', { name: 'Sign the decision' }).click();
 	await expect(verifier.getByText('Say why: the student reads it.')).toBeVisible();
-	await verifier.getByLabel(/^Award:/).check();
+	await verifier.getByRole('radio', { name: /Award: the evidence/ }).check();
 	await verifier.getByRole('button', { name: 'Sign the decision' }).click();
 	await expect(verifier.getByText('Awarded', { exact: true }).first()).toBeVisible();
 

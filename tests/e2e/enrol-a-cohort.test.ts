@@ -12,7 +12,9 @@ test('a school admin enrols a cohort: places by card, a list, letters, students'
 	const page = await as(office);
 	await page.goto('/s/averholm/cohorts');
 	await page.getByLabel('Name').fill('Winter intake, quay group');
-	await page.getByLabel('Course').selectOption({ label: 'Reading failed engines' });
+	await page
+		.getByLabel('Course', { exact: true })
+		.selectOption({ label: 'Reading failed engines' });
 	await page.getByLabel('First day').fill('2026-12-07');
 	await page.getByLabel('Last day').fill('2026-12-01');
 	await page.getByLabel('Instructor').selectOption({ label: 'Rune Castellane' });
@@ -37,7 +39,7 @@ test('a school admin enrols a cohort: places by card, a list, letters, students'
 	});
 
 	await test.step('a card that is refused opens nothing', async () => {
-		await page.getByLabel('Places', { exact: true }).fill('2');
+		await page.getByRole('spinbutton', { name: 'Places', exact: true }).fill('2');
 		await page.getByRole('button', { name: 'To the till' }).click();
 		await expect(page).toHaveURL(new RegExp(`^${site.till.url}`));
 		await page.locator('#card').fill('4000 0000 0000 0002');

@@ -44,9 +44,10 @@ export function proofStressMPa(propertyClass: '8.8' | '10.9' | '12.9', diameterM
 /**
  * Proof load of a bolt: what it bears and still springs back.
  *
- * Formula: Fp = As · Sp. Source: ISO 898-1:2013, table 5.
+ * Formula: Fp = As · Sp, with As to three significant figures, as the standard's tables have it.
+ * Source: ISO 898-1:2013, table 5.
  * @returns N
- * @example proofLoadN(10, 1.25, '10.9') // 50 800
+ * @example proofLoadN(10, 1.25, '10.9') // 50 796
  */
 export function proofLoadN(
 	diameterMm: number,
@@ -54,7 +55,8 @@ export function proofLoadN(
 	propertyClass: '8.8' | '10.9' | '12.9'
 ): Outcome<number> {
 	const area = stressAreaMm2(diameterMm, pitchMm);
-	return area.ok ? computed(area.value * proofStressMPa(propertyClass, diameterMm)) : area;
+	if (!area.ok) return area;
+	return computed(Number(area.value.toPrecision(3)) * proofStressMPa(propertyClass, diameterMm));
 }
 
 /**

@@ -1,0 +1,77 @@
+import fc from 'fast-check';
+import { describe, expect, it } from 'vitest';
+import { leastMm, mostMm, outOfRoundMm, taperMm } from '$lib/kernel/geometry/diameter-grid';
+import { oilClearance } from '$lib/kernel/geometry/oil-clearance';
+import { expectWithin, referenceOf } from '../../support/reference';
+
+const inch = 25.4;
+const value = (outcome: { ok: true; value: number } | { ok: false; because: string }) => {
+	if (!outcome.ok) throw new Error(outcome.because);
+	return outcome.value;
+};
+
+describe('published readings', () => {
+	it.each(referenceOf<{ readingsIn: [number, number] }>('clearances.json'))('%s', (_, entry) => {
+		const [a, b] = entry.readingsIn.map((one) => one * inch) as [number, number];
+		const sums = {
+			'out-of-round': () => value(outOfRoundMm([[a, b]])),
+			taper: () => value(taperMm([[a], [b]])),
+			clearance: () => {
+				const found = oilClearance([[a]], [[b]]);
+				if (!found.ok) throw new Error(found.because);
+				return found.value.leastMm;
+			}
+		};
+		const kind = /taper/.test(entry.quantity)
+			? 'taper'
+			: /clearance/.test(entry.quantity)
+				? 'clearance'
+				: 'out-of-round';
+		expectWithin(sums[kind]() / inch, { ...entry, tolerance: { kind: 'absolute', value: 1e-6 } });
+	});
+});
+
+describe('a grid of diameters', () => {
+	const reading = fc.integer({ min: 39_900, max: 40_100 }).map((one) => one / 1000);
+	const grid = fc.array(fc.array(reading, { minLength: 2, maxLength: 2 }), {
+		minLength: 2,
+		maxLength: 4
+	});
+	it('does not care which plane was read first, nor from which end', () => {
+		fc.assert(
+			fc.property(grid, (rows) => {
+				expect(outOfRoundMm(rows)).toEqual(outOfRoundMm(rows.map((row) => row.toReversed())));
+				expect(taperMm(rows)).toEqual(taperMm(rows.toReversed()));
+			})
+		);
+	});
+	it('never finds more than the whole spread', () => {
+		fc.assert(
+			fc.property(grid, (rows) => {
+				const spread = value(mostMm(rows)) - value(leastMm(rows));
+				expect(value(outOfRoundMm(rows))).toBeLessThanOrEqual(spread + 1e-6);
+				expect(value(taperMm(rows))).toBeLessThanOrEqual(spread + 1e-6);
+			})
+		);
+	});
+	it('says what is missing instead of giving a number', () => {
+		expect(outOfRoundMm([[40, null]])).toEqual({
+			ok: false,
+			because: '1 of 2 readings are missing'
+		});
+		expect(outOfRoundMm([[40]]).ok).toBe(false);
+		expect(taperMm([[40, 40]]).ok).toBe(false);
+		expect(outOfRoundMm([[Number.NaN, 40]]).ok).toBe(false);
+		expect(oilClearance([[40]], [[40.01]]).ok).toBe(false);
+	});
+	it('orders least, mean and most', () => {
+		fc.assert(
+			fc.property(grid, (pins) => {
+				const found = oilClearance([[40.2, 40.21]], pins);
+				if (!found.ok) throw new Error(found.because);
+				expect(found.value.leastMm).toBeLessThanOrEqual(found.value.meanMm + 1e-6);
+				expect(found.value.meanMm).toBeLessThanOrEqual(found.value.mostMm + 1e-6);
+			})
+		);
+	});
+});
