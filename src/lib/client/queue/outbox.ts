@@ -8,6 +8,8 @@ export type Waiting = {
 	epoch: number;
 	number: number;
 	response: unknown;
+	/** Set aside: the server would not take it, and said why. Tried again when the page is opened. */
+	refused?: string;
 };
 
 interface Boxes extends DBSchema {
@@ -38,9 +40,18 @@ export async function takeOut(sent: Waiting): Promise<void> {
 	await transaction.done;
 }
 
+/** Keeps one that was refused, unless a newer one has taken its place meanwhile. */
+export async function setAside(refused: Waiting, because: string): Promise<void> {
+	const transaction = (await box()).transaction('waiting', 'readwrite');
+	const held = await transaction.store.get(refused.questionId);
+	if (held?.requestKey === refused.requestKey)
+		await transaction.store.put({ ...held, refused: because });
+	await transaction.done;
+}
+
 export async function waitingFor(sittingId: string): Promise<Waiting[]> {
 	const all = await (await box()).getAllFromIndex('waiting', 'sitting', sittingId);
-	return all.sort((a, b) => a.number - b.number);
+	return all.sort((a, b) => a.epoch - b.epoch || a.number - b.number);
 }
 
 export async function emptyFor(sittingId: string): Promise<void> {

@@ -22,8 +22,9 @@ export function passRuleWords(quiz: Pick<Quiz, 'cutScore'>, questions: number): 
 	return `You pass with ${figure(Math.ceil(quiz.cutScore * questions * 100 - 1e-6) / 100)} of ${questions} points, which is ${percent(quiz.cutScore)}.`;
 }
 
+/** Rounded down like the share beside it. */
 function figure(value: number): string {
-	return String(Math.round(value * 100) / 100);
+	return String(Math.floor(value * 100 + 1e-6) / 100);
 }
 
 /** Rounded down: 69.96 % must not read as the 70 % that would have passed. */

@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { kindOf } from '$lib/domain/questions/registry';
+import { countsStill } from '$lib/domain/quizzes/deadline';
 import { Problem } from '$lib/domain/problem';
 import { findSitting, noteFact, responsesOfSitting } from '../../data/queries/sittings';
 import { revisionById } from '../../data/queries/publications';
@@ -23,6 +24,9 @@ export const openOnDevice = writeCase({
 	},
 	async run({ scope, subject: { sitting }, input, at, newId }) {
 		if (sitting.state !== 'open') throw new Problem('closed', 'This sitting is handed in.');
+		const deadline = sitting.deadlineAt === null ? null : Date.parse(sitting.deadlineAt);
+		if (!countsStill(at.getTime(), deadline))
+			throw new Problem('closed', 'The time of this sitting is over. What was saved in it counts.');
 		const epoch = sitting.epoch + 1;
 		await update(scope, sittings, { id: sitting.id, epoch: sitting.epoch }, { epoch });
 		await noteFact(scope, {
@@ -60,7 +64,8 @@ export const openOnDevice = writeCase({
 					position,
 					kind: question.kind,
 					face: kind.face(question.body, drawn.value),
-					response: response?.body ?? null
+					response: response?.body ?? null,
+					given: response ? { epoch: response.epoch, number: response.number } : null
 				};
 			})
 		};
