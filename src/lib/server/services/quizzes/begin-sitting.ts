@@ -2,6 +2,7 @@ import { z } from 'zod';
 import { drawSitting } from '$lib/domain/quizzes/draw-sitting';
 import { deadlineOf } from '$lib/domain/quizzes/deadline';
 import { mayBegin } from '$lib/domain/quizzes/may-begin';
+import { poolFor } from '$lib/domain/quizzes/pool-for';
 import type { Question } from '$lib/domain/questions/schema';
 import { Problem } from '$lib/domain/problem';
 import { setStepState, stepState } from '../../data/queries/enrolments';
@@ -23,7 +24,7 @@ export const beginSitting = writeCase({
 		return found && { schoolId: scope.schoolId, ownerId: found.enrolment.personId, ...found };
 	},
 	async run({ scope, house, subject, me, at, newId, record }) {
-		const { enrolment, step, quiz, quizRevision, sheetRevision } = subject;
+		const { enrolment, course, step, quiz, quizRevision, sheetRevision } = subject;
 		const open = await openSittingOf(scope, me);
 		if (open?.enrolmentId === enrolment.id && open.stepKey === step.key)
 			return { sittingId: open.id };
@@ -40,14 +41,15 @@ export const beginSitting = writeCase({
 		);
 		if (!allowed.ok) throw new Problem('conflict', allowed.because);
 
-		const pool = await newestRevisions(scope, 'question');
+		const drawer = await newestRevisions(scope, 'question');
+		const pool = poolFor(
+			course,
+			drawer.map(({ id, key, body }) => ({ ...(body as Question), key, revisionId: id }))
+		);
 		const seed = Buffer.from(house.chance(16)).toString('hex');
 		const drawn = drawSitting(
 			quiz,
-			pool.map(({ key, body }) => {
-				const { outcome, kind } = body as Question;
-				return { key, outcome, kind };
-			}),
+			pool,
 			seed,
 			await questionsHadBefore(scope, me, quizRevision.publicationId)
 		);
@@ -81,7 +83,7 @@ export const beginSitting = writeCase({
 			possible: null,
 			passed: null
 		});
-		const revisionOf = new Map(pool.map((one) => [one.key, one.id]));
+		const revisionOf = new Map(pool.map((one) => [one.key, one.revisionId]));
 		await insertAll(
 			scope,
 			sittingQuestions,

@@ -136,7 +136,9 @@ export const readSittingResult = readCase({
 				const kind = kindOf(question.kind);
 				const drawn = kind.draw(question.body, seed, figures);
 				if (!drawn.ok) throw new Error(`${question.key}: ${drawn.because}`);
-				const response = kept.find((one) => one.sittingQuestionId === id);
+				const found = kept.find((one) => one.sittingQuestionId === id);
+				// What was given and cleared again was left out, not got wrong.
+				const response = found && !kind.emptyIsOmitted(found.body) ? found : undefined;
 				return {
 					id,
 					position,
