@@ -33,6 +33,7 @@ export const stageTurn: Sum<Parameters, Inputs> = {
 		if (angles.length === 0 || pitchMm === undefined)
 			return cannot(`${found.value.words} has no angle stage`);
 		const all = angles.reduce((sum, one) => sum + one, 0);
+		if (all < 30) return cannot(`${found.value.words} turns too little to ask about`);
 		// Part of the turn is done: how much is left is this student's own figure.
 		const turned =
 			ask === 'degrees'
