@@ -30,6 +30,52 @@ test('a lesson opens with its caution, and its balloons lead through it', async 
 	await expectAccessible(page);
 });
 
+test('a film is watched: captions, what is said, and what was really seen, on every device', async ({
+	as,
+	openContext
+}) => {
+	const page = await as('jonas@averholm.example');
+	await page.goto('/s/averholm/bench');
+	await page.getByRole('link', { name: 'Reading failed parts to the cause' }).click();
+	await expect(page.getByRole('heading', { name: /^Film/ })).toHaveCount(0);
+	const student = await as('student@averholm.example');
+	await student.goto('/s/averholm/bench');
+	await student.getByRole('link', { name: 'Crankpins and clearances' }).click();
+	await expect(student.getByText('0:00–2:04').first()).toBeVisible();
+	const address = student.url();
+
+	const said = student.getByRole('complementary', { name: 'Said here' });
+	await student.locator('.vjs-tech').waitFor();
+	await said
+		.getByRole('button', { name: 'Write each reading down before you take the next.' })
+		.click();
+	await expect(said.locator('[aria-current="true"]')).toHaveText(
+		'Write each reading down before you take the next.'
+	);
+	await expect(student.locator('.vjs-text-track-cue')).toContainText('Write each reading down');
+	await student.waitForTimeout(7000);
+	await student.locator('.vjs-tech').evaluate((film: HTMLVideoElement) => film.pause());
+	await expect(student.getByText('0:00–2:04')).toHaveCount(0);
+	const unseen = await student.getByText(/^Not yet seen:/).textContent();
+	expect(unseen).toMatch(/0:00–0:3\d, 0:\d\d–2:04/);
+	await expectAccessible(student);
+
+	await student.reload();
+	await expect(student.getByText(/^Not yet seen:/)).toHaveText(unseen ?? '');
+	const phone = await openContext({
+		viewport: { width: 360, height: 740 },
+		storageState: await student.context().storageState()
+	});
+	const second = await phone.newPage();
+	await second.goto(address);
+	await expect(second.getByText(/^Not yet seen:/)).toHaveText(unseen ?? '');
+
+	await test.step('saying “read” without having watched is refused', async () => {
+		await second.getByRole('button', { name: 'I have read this lesson' }).click();
+		await expect(second.getByText('Watch the film first.')).toBeVisible();
+	});
+});
+
 test('a quiz loses nothing: a closed browser, a lost network, another device', async ({
 	as,
 	openContext,
