@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { link, words } from '../blocks';
-import { shortWords, webAddress } from '../fields';
+import { reasonWords, shortWords, webAddress } from '../fields';
 import { mailKind } from '../kind';
 
 export const awardDecided = mailKind({
@@ -10,7 +10,7 @@ export const awardDecided = mailKind({
 		courseTitle: shortWords,
 		decision: z.enum(['awarded', 'declined']),
 		/** Said when it was declined. */
-		reason: shortWords.nullish(),
+		reason: reasonWords.nullish(),
 		address: webAddress
 	}),
 	secret: [],

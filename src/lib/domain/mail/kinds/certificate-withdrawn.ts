@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { figure, words } from '../blocks';
-import { shortWords } from '../fields';
+import { reasonWords, shortWords } from '../fields';
 import { mailKind } from '../kind';
 
 export const certificateWithdrawn = mailKind({
@@ -9,7 +9,7 @@ export const certificateWithdrawn = mailKind({
 		name: shortWords,
 		courseTitle: shortWords,
 		code: shortWords,
-		reason: shortWords
+		reason: reasonWords
 	}),
 	secret: [],
 	example: {

@@ -8,9 +8,10 @@ import {
 	findCertificate,
 	markersOf
 } from '../../data/queries/awards';
-import { schoolById } from '../../data/queries/schools';
-import { certificates } from '../../data/models';
-import { select, update } from '../../data/rows';
+import { findPerson, schoolById } from '../../data/queries/schools';
+import { accounts, certificates } from '../../data/models';
+import { find, select, update } from '../../data/rows';
+import { acrossSchools } from '../../data/scope';
 import { readCase, writeCase } from '../use-case';
 
 /** Anyone, without an account: whose it is, for what, by whom, and whether it stands. */
@@ -101,7 +102,7 @@ export const withdrawCertificate = writeCase({
 		const markerIds = await markersOf(scope, award.enrolmentId);
 		return { schoolId: scope.schoolId, ownerId: certificate.personId, markerIds, certificate };
 	},
-	async run({ scope, subject: { certificate }, input, me, at, record }) {
+	async run({ scope, subject: { certificate }, input, me, at, record, mail }) {
 		const changed = await update(
 			scope,
 			certificates,
@@ -114,6 +115,14 @@ export const withdrawCertificate = writeCase({
 			subject: certificate.id,
 			data: { code: certificate.code, reason: input.reason }
 		});
+		const person = await findPerson(scope, certificate.personId);
+		const account = person && (await find(acrossSchools(scope), accounts, { id: person.accountId }));
+		if (account) {
+			const { code, face } = certificate;
+			const about = { name: face.personName, courseTitle: face.course.title, code };
+			const payload = { ...about, reason: input.reason };
+			await mail({ kind: 'certificate-withdrawn', to: account.email, payload });
+		}
 		return { withdrawn: certificate.code };
 	}
 });
