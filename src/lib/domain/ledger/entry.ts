@@ -22,6 +22,14 @@ export function sealedText(entry: LedgerEntry): string {
 	return text;
 }
 
+/**
+ * An entry as one line of a file (JSON Lines): take `hash` out again, and what is left, as
+ * canonical JSON, is the text that was hashed. An auditor needs nothing of ours to check it.
+ */
+export function fileLine(entry: LedgerEntry & { hash: string }): string {
+	return canonicalize({ ...(JSON.parse(sealedText(entry)) as object), hash: entry.hash }) + '\n';
+}
+
 export type ChainFault = { number: number; because: string };
 
 /**

@@ -27,8 +27,12 @@ type Answer<Extra> = Promise<ActionFailure<FormFault & Partial<Extra>> | (FormDo
 export type FormOptions<Out, Extra extends object> = {
 	/** What the address says (ids), laid over what the form says. */
 	extra?: (event: RequestEvent) => Record<string, unknown>;
-	/** Where to go next (a path), or data for the page. */
-	done?: (answer: Out, event: RequestEvent) => Next<Extra> | Promise<Next<Extra>>;
+	/** Where to go next (a path), or data for the page; `sent` is what the form said. */
+	done?: (
+		answer: Out,
+		event: RequestEvent,
+		sent: Record<string, unknown>
+	) => Next<Extra> | Promise<Next<Extra>>;
 	/** Off where the answer is a secret shown once: an answer that is kept could be read again. */
 	keyed?: boolean;
 };
@@ -46,7 +50,7 @@ export function formAction<Out, Extra extends object = object>(
 		answerForm<Extra>(event, useCase.name, async ({ values, requestKey }) => {
 			const key = keyed && !holdsSecret(values) ? requestKey : undefined;
 			const answer = await useCase(await event.locals.caller(key), { ...values, ...extra(event) });
-			return done(answer, event);
+			return done(answer, event, values);
 		});
 }
 

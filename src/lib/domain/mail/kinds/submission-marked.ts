@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { link, list, words, type Block } from '../blocks';
-import { shortWords, webAddress } from '../fields';
+import { reasonWords, shortWords, webAddress } from '../fields';
 import { mailKind } from '../kind';
 
 export const submissionMarked = mailKind({
@@ -11,7 +11,7 @@ export const submissionMarked = mailKind({
 		attempt: z.int().min(1),
 		decision: z.enum(['competent', 'not-yet']),
 		/** What to do again, one line each; the rest stands. */
-		redo: z.array(shortWords).max(50),
+		redo: z.array(reasonWords).max(50),
 		address: webAddress
 	}),
 	secret: [],

@@ -9,6 +9,7 @@ import {
 	markersOf
 } from '../../data/queries/awards';
 import { findPerson, schoolById } from '../../data/queries/schools';
+import { qrSvg } from '../../gateways/qr/qr';
 import { accounts, certificates } from '../../data/models';
 import { find, select, update } from '../../data/rows';
 import { acrossSchools } from '../../data/scope';
@@ -45,7 +46,7 @@ export const listOwnCertificates = readCase({
 	action: 'bench:read',
 	input: z.object({}).default({}),
 	subject: ({ scope, me }) => Promise.resolve({ schoolId: scope.schoolId, ownerId: me }),
-	async run({ scope, me }) {
+	async run({ scope, house, me }) {
 		const own = await select(
 			scope,
 			certificates,
@@ -59,7 +60,11 @@ export const listOwnCertificates = readCase({
 				face,
 				issuedAt,
 				withdrawnAt,
-				withdrawnReason
+				withdrawnReason,
+				/** Held to somebody's camera; a withdrawn one is nothing to show around. */
+				checkQr: withdrawnAt
+					? null
+					: qrSvg(checkAddress(house.config.ORIGIN, code), `QR code: the page that checks ${code}`)
 			}))
 		};
 	}
@@ -116,7 +121,8 @@ export const withdrawCertificate = writeCase({
 			data: { code: certificate.code, reason: input.reason }
 		});
 		const person = await findPerson(scope, certificate.personId);
-		const account = person && (await find(acrossSchools(scope), accounts, { id: person.accountId }));
+		const account =
+			person && (await find(acrossSchools(scope), accounts, { id: person.accountId }));
 		if (account) {
 			const { code, face } = certificate;
 			const about = { name: face.personName, courseTitle: face.course.title, code };

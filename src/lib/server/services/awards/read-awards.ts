@@ -75,6 +75,7 @@ export const readAward = readCase({
 			markerNames: markerNames.flatMap((one) => (one ? [one.name] : [])),
 			/** Who marked the work, or did it, does not decide. */
 			mayDecide: !markers.includes(me) && enrolment.personId !== me,
+			isOwn: enrolment.personId === me,
 			certificate: certificate && {
 				id: certificate.id,
 				code: certificate.code,

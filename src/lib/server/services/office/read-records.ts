@@ -1,7 +1,8 @@
 import { z } from 'zod';
-import { chainFault } from '$lib/domain/ledger/entry';
+import { chainFault, fileLine } from '$lib/domain/ledger/entry';
 import { hashOf, readLedger } from '../../data/queries/ledger';
 import { mailsOfSchool } from '../../data/queries/mails';
+import { schoolById } from '../../data/queries/schools';
 import { readCase } from '../use-case';
 
 const pageLength = 50;
@@ -30,6 +31,23 @@ export const readLedgerPage = readCase({
 			total: all.length,
 			fault: chainFault(all, hashOf) ?? null
 		};
+	}
+});
+
+/** The whole ledger as a file to take away, oldest entry first. */
+export const exportLedger = readCase({
+	name: 'export-ledger',
+	action: 'ledger:read',
+	input: z.object({}).default({}),
+	subject: ({ scope }) => Promise.resolve({ schoolId: scope.schoolId }),
+	async run({ scope }) {
+		const [entries, school] = await Promise.all([
+			readLedger(scope),
+			schoolById(scope, scope.schoolId)
+		]);
+		const last = entries.at(-1)?.number ?? 0;
+		const fileName = `ledger-${school?.slug ?? 'school'}-${last}.jsonl`;
+		return { fileName, text: entries.map(fileLine).join('') };
 	}
 });
 

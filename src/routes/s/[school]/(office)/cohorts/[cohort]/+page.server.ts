@@ -17,7 +17,10 @@ export const actions = {
 	buy: formAction(buyPlaces, { extra: at, done: ({ url }) => url }),
 	record: formAction(recordPayment, { extra: at }),
 	/** The dry run: nothing is written, and the list comes back with its plan. */
-	plan: formAction(planCohortRoster, { extra: at, done: (plan) => ({ plan }) }),
+	plan: formAction(planCohortRoster, {
+		extra: at,
+		done: (plan, _, { list }) => ({ plan, list: String(list) })
+	}),
 	apply: formAction(applyCohortRoster, { extra: at, done: (applied) => ({ applied }) }),
 	'invite-again': formAction(inviteAgain),
 	'take-off': formAction(withdrawFromRoster)
