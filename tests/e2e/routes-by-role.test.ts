@@ -135,6 +135,7 @@ const table: Record<string, Line> = {
 	},
 	'/s/[school]/(office)/mail': { read: ['office'] },
 	'/s/[school]/(office)/ledger': { read: ['verifier', 'office'] },
+	'/s/[school]/(office)/ledger/file': { read: ['verifier', 'office'] },
 	'/s/[school]/(office)/people': {
 		read: ['office'],
 		actions: {
@@ -201,7 +202,7 @@ function routes(): { id: string; folder: string }[] {
 
 /** The names of a page's form actions, read from its source. */
 function actionsIn(folder: string): string[] {
-	let text = '';
+	let text: string;
 	try {
 		text = readFileSync(join(folder, '+page.server.ts'), 'utf8');
 	} catch {
