@@ -4,7 +4,7 @@ import { readRoster } from '$lib/domain/cohorts/read-roster';
 import { inputProblem } from '$lib/domain/problem';
 import { findCohort, freePlaces, rosterOf } from '../../data/queries/cohorts';
 import { rosterEntries } from '../../data/models';
-import { insertAll } from '../../data/rows';
+import { insertAll, remove } from '../../data/rows';
 import type { SchoolScope } from '../../data/scope';
 import { readCase, writeCase } from '../use-case';
 import { inviteWaiting } from './invite-waiting';
@@ -25,7 +25,9 @@ async function findHere({ scope, input }: { scope: SchoolScope; input: { cohortI
 async function planFor(scope: SchoolScope, cohortId: string, list: string) {
 	const reading = readRoster(list);
 	if (reading.fault) throw inputProblem({ list: [reading.fault] });
-	const standing = new Set((await rosterOf(scope, cohortId)).map((one) => one.email));
+	// Who was taken off may be put on again.
+	const roster = (await rosterOf(scope, cohortId)).filter((one) => one.state !== 'withdrawn');
+	const standing = new Set(roster.map((one) => one.email));
 	return planRoster(reading.rows, standing, (await freePlaces(scope, cohortId)).length);
 }
 
@@ -55,11 +57,16 @@ export const applyCohortRoster = writeCase({
 				list: plan.rows.flatMap((row) => row.faults.map((fault) => `Line ${row.line}: ${fault}`))
 			});
 		const fresh = plan.rows.filter((row) => row.outcome !== 'already');
+		// One entry an address and cohort: whoever was taken off before stands at the end again.
+		const emails = fresh.map((row) => row.email);
+		await remove(scope, rosterEntries, { cohortId: cohort.id, email: emails, state: 'withdrawn' });
+		// Places go by the order of the list: ids made in one millisecond have none by themselves.
+		const ids = fresh.map(newId).sort();
 		await insertAll(
 			scope,
 			rosterEntries,
-			fresh.map((row) => ({
-				id: newId(),
+			fresh.map((row, index) => ({
+				id: ids[index] ?? newId(),
 				cohortId: cohort.id,
 				email: row.email,
 				name: row.name,
