@@ -1,4 +1,6 @@
 const widest = 42;
+/** Seconds. A caption that stays longer is read twice. */
+const longest = 7;
 
 /** @param {number} seconds */
 function stamp(seconds) {
@@ -32,7 +34,8 @@ function spread([a = '', b = '']) {
 export function captionsOf(lines) {
 	const cues = lines.map((line, i) => {
 		const next = lines[i + 1]?.startS ?? line.endS + 2;
-		const end = Math.min(line.endS + 0.7, next - 0.1);
+		const stays = Math.max(line.endS, Math.min(line.endS + 0.7, line.startS + longest));
+		const end = Math.min(stays, next - 0.1);
 		return `${stamp(line.startS)} --> ${stamp(end)}\n${inTwoLines(line.say)}`;
 	});
 	return `WEBVTT\n\n${cues.join('\n\n')}\n`;

@@ -3,7 +3,9 @@ import { catalogue } from '$lib/content/catalogue';
 import type { DataSheet } from '$lib/domain/data-sheets/schema';
 import { dimensionOf, fastenerOf, patternOf } from '$lib/domain/data-sheets/value-of';
 import { displacementCm3 } from '$lib/kernel/cylinder/displacement';
-import { preloadN, proofLoadN, stressAreaMm2 } from '$lib/kernel/fasteners/stress-area';
+import { preloadN } from '$lib/kernel/fasteners/preload';
+import { proofLoadN } from '$lib/kernel/fasteners/proof-load';
+import { stressAreaMm2 } from '$lib/kernel/fasteners/stress-area';
 import { travelMm } from '$lib/kernel/fasteners/turn';
 
 /** Nut factors that bracket a lubrication: textbook and supplier tables, reference 04, K-a to K-k. */

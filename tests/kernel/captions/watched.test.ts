@@ -42,6 +42,39 @@ describe('watched stretches', () => {
 		]);
 		expect(watchedS(merged) + watchedS(gaps(merged, 40))).toBe(40);
 	});
+	it('count nothing past the end of the film', () => {
+		expect(
+			coverage(
+				[
+					[0, 50],
+					[100, 160]
+				],
+				100
+			)
+		).toBe(0.5);
+		expect(
+			gaps(
+				[
+					[0, 50],
+					[100, 160]
+				],
+				100
+			)
+		).toEqual([[50, 100]]);
+		expect(coverage([], 0)).toBe(1);
+		expect(() => coverage([], Number.NaN)).toThrow(RangeError);
+	});
+	it('reported bit by bit come to the same as all at once', () => {
+		fc.assert(
+			fc.property(fc.array(stretch), (all) => {
+				const bitByBit = all.reduce<[number, number][]>(
+					(held, one) => mergeIntervals([...held, one]),
+					[]
+				);
+				expect(bitByBit).toEqual(mergeIntervals(all));
+			})
+		);
+	});
 	it('that end before they begin are refused', () => {
 		expect(() => mergeIntervals([[5, 4]])).toThrow(RangeError);
 	});

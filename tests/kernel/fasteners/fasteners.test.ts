@@ -1,12 +1,9 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { torqueAtFastener, wrenchSetting } from '$lib/kernel/fasteners/extension';
-import {
-	preloadN,
-	proofLoadN,
-	stressAreaIn2,
-	stressAreaMm2
-} from '$lib/kernel/fasteners/stress-area';
+import { effectiveLever, torqueAtFastener, wrenchSetting } from '$lib/kernel/fasteners/extension';
+import { preloadN, torqueForPreloadNm } from '$lib/kernel/fasteners/preload';
+import { proofLoadN, proofStressMPa, type PropertyClass } from '$lib/kernel/fasteners/proof-load';
+import { stressAreaIn2, stressAreaMm2 } from '$lib/kernel/fasteners/stress-area';
 import { firstWrongStep, loosening, orderFromMiddle } from '$lib/kernel/fasteners/tightening-order';
 import { travelMm } from '$lib/kernel/fasteners/turn';
 import { convert } from '$lib/kernel/quantity/units';
@@ -25,6 +22,16 @@ describe('a wrench with an extension, published examples', () => {
 	it.each(referenceOf<Lever>('torque-extension-inverse.json'))('%s', (_, entry) => {
 		expectWithin(value(torqueAtFastener(entry)), entry);
 	});
+	it.each(referenceOf<Omit<Lever, 'torque'> & { asks: string }>('torque-lever.json'))(
+		'%s',
+		(_, entry) => {
+			const found =
+				entry.asks === 'effective lever'
+					? value(effectiveLever(entry))
+					: value(torqueAtFastener({ ...entry, torque: 100 })) - 100;
+			expectWithin(found, entry);
+		}
+	);
 	it('setting and arrival are inverse at any angle', () => {
 		const number = (min: number, max: number) => fc.double({ min, max, noNaN: true });
 		fc.assert(
@@ -64,7 +71,9 @@ describe('stress areas and loads, published tables', () => {
 		}
 	);
 	it.each(
-		referenceOf<{ diameterMm: number; pitchMm: number; propertyClass: '8.8' }>('proof-loads.json')
+		referenceOf<{ diameterMm: number; pitchMm: number; propertyClass: PropertyClass }>(
+			'proof-loads.json'
+		)
 	)('%s', (_, entry) => {
 		expectWithin(
 			value(proofLoadN(entry.diameterMm, entry.pitchMm, entry.propertyClass)) / 1000,
@@ -73,18 +82,61 @@ describe('stress areas and loads, published tables', () => {
 	});
 	it.each(
 		referenceOf<{ nutFactor: number; diameterIn: number; preloadLbf: number }>('nut-factor.json')
-	)('%s: the published torque gives the preload back', (_, entry) => {
-		const torqueNm = convert(
-			'torque',
-			entry.expected,
-			entry.unit === 'lbf.in' ? 'lbf·in' : 'lbf·ft',
-			'N·m'
+	)('%s', (_, entry) => {
+		const torqueNm = value(
+			torqueForPreloadNm(
+				convert('force', entry.preloadLbf, 'lbf', 'N'),
+				entry.nutFactor,
+				entry.diameterIn * 25.4
+			)
 		);
-		const preload = value(preloadN(torqueNm, entry.nutFactor, entry.diameterIn * 25.4));
-		// As good as the printed torque: its tolerance as a share of it.
-		const share = (entry.tolerance.value ?? 0) / entry.expected + 0.003;
-		expect(Math.abs(convert('force', preload, 'N', 'lbf') / entry.preloadLbf - 1)).toBeLessThan(
-			share
+		const unit = entry.unit === 'lbf.in' ? 'lbf·in' : 'lbf·ft';
+		expectWithin(convert('torque', torqueNm, 'N·m', unit), entry);
+	});
+	it('torque and preload are inverse, and more torque is more preload', () => {
+		const number = (min: number, max: number) => fc.double({ min, max, noNaN: true });
+		fc.assert(
+			fc.property(number(1, 500), number(0.08, 0.4), number(4, 30), (torque, k, d) => {
+				const preload = value(preloadN(torque, k, d));
+				expect(value(torqueForPreloadNm(preload, k, d))).toBeCloseTo(torque, 6);
+				expect(value(preloadN(torque * 1.01, k, d))).toBeGreaterThan(preload);
+				expect(value(preloadN(torque, k * 1.01, d))).toBeLessThan(preload);
+			})
+		);
+	});
+	it('a coarser thread on the same bolt bears less, a higher class more', () => {
+		const number = (min: number, max: number) => fc.double({ min, max, noNaN: true });
+		fc.assert(
+			fc.property(number(5, 30), number(0.5, 1.5), (d, pitch) => {
+				expect(value(stressAreaMm2(d, pitch * 1.1))).toBeLessThan(value(stressAreaMm2(d, pitch)));
+				const loads = (['4.6', '5.8', '8.8', '10.9', '12.9'] as const).map((one) =>
+					value(proofLoadN(d, pitch, one))
+				);
+				expect(loads).toEqual(loads.toSorted((a, b) => a - b));
+			})
+		);
+		expect([16, 16.5].map((d) => proofStressMPa('8.8', d))).toEqual([580, 600]);
+	});
+	it('an answer is a number or a reason, never NaN, whatever is asked', () => {
+		const any = fc.double();
+		const sound = (found: { ok: true; value: number } | { ok: false; because: string }) =>
+			found.ok ? Number.isFinite(found.value) : found.because.length > 0;
+		fc.assert(
+			fc.property(any, any, any, any, (a, b, c, d) => {
+				const lever = { torque: a, lengthL: b, extensionE: c, angleDeg: d };
+				for (const found of [
+					wrenchSetting(lever),
+					torqueAtFastener(lever),
+					effectiveLever(lever),
+					stressAreaMm2(a, b),
+					stressAreaIn2(a, b),
+					proofLoadN(a, b, '8.8'),
+					preloadN(a, b, c),
+					torqueForPreloadNm(a, b, c)
+				])
+					expect(sound(found)).toBe(true);
+			}),
+			{ numRuns: 500 }
 		);
 	});
 	it('refuses threads that cannot be cut', () => {
@@ -111,17 +163,56 @@ describe('tightening orders', () => {
 		expect(order.value.slice(0, 4).toSorted()).toEqual(['A1', 'A2', 'B1', 'B2']);
 		expect(loosening(order.value)[0]).toBe(order.value[7]);
 	});
+	it('have as many bolts as the pattern, whatever the pattern', () => {
+		const place = fc.integer({ min: -200, max: 200 });
+		const bolts = fc
+			.array(fc.tuple(place, place), { minLength: 2, maxLength: 14 })
+			.map((places) => places.map(([xMm, yMm], i) => ({ id: `${i}`, xMm, yMm })));
+		fc.assert(
+			fc.property(bolts, (pattern) => {
+				const order = orderFromMiddle(pattern);
+				if (!order.ok) throw new Error(order.because);
+				expect(order.value.toSorted()).toEqual(pattern.map(({ id }) => id).toSorted());
+				expect(firstWrongStep(order.value, order.value)).toEqual({ ok: true, value: null });
+				expect(loosening(loosening(order.value))).toEqual(order.value);
+			})
+		);
+	});
+	it('are not made of bolts without a place or with one name', () => {
+		const here = { id: 'a', xMm: 0, yMm: 0 };
+		expect(orderFromMiddle([here, { ...here, id: 'b', xMm: Number.NaN }]).ok).toBe(false);
+		expect(orderFromMiddle([here, here])).toEqual({ ok: false, because: 'a bolt is named twice' });
+		expect(orderFromMiddle([here]).ok).toBe(false);
+	});
+	it('find a swap of two bolts at the earlier one', () => {
+		const wanted = ['a', 'b', 'c', 'd', 'e', 'f', 'g', 'h'];
+		const step = fc.integer({ min: 0, max: wanted.length - 1 });
+		fc.assert(
+			fc.property(step, step, (i, j) => {
+				fc.pre(i !== j);
+				const given = wanted.with(i, wanted[j] ?? '').with(j, wanted[i] ?? '');
+				const first = Math.min(i, j);
+				expect(firstWrongStep(wanted, given)).toEqual({
+					ok: true,
+					value: { step: first + 1, was: given[first], wanted: wanted[first] }
+				});
+			})
+		);
+	});
 	it('name the first wrong step', () => {
 		expect(firstWrongStep(['a', 'b', 'c'], ['a', 'c', 'b'])).toEqual({
 			ok: true,
 			value: { step: 2, was: 'c', wanted: 'b' }
 		});
 		expect(firstWrongStep(['a', 'b'], ['a', 'b'])).toEqual({ ok: true, value: null });
-		expect(firstWrongStep(['a', 'b'], ['a']).ok).toBe(false);
+		expect(firstWrongStep(['a', 'b'], ['a'])).toEqual({ ok: false, because: '1 bolt is missing' });
+		expect(firstWrongStep(['a', 'b'], ['a', 'x']).ok).toBe(false);
 		expect(firstWrongStep(['a', 'b'], ['a', 'a']).ok).toBe(false);
 	});
 	it('a turn travels its share of the pitch', () => {
 		expect(travelMm(360, 1.25)).toBe(1.25);
 		expect(travelMm(90, 1.25)).toBe(0.3125);
+		expect(() => travelMm(-1, 1.25)).toThrow(RangeError);
+		expect(() => travelMm(Infinity, 1.25)).toThrow(RangeError);
 	});
 });

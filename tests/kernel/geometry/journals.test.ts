@@ -27,7 +27,9 @@ describe('published readings', () => {
 			: /clearance/.test(entry.quantity)
 				? 'clearance'
 				: 'out-of-round';
-		expectWithin(sums[kind]() / inch, { ...entry, tolerance: { kind: 'absolute', value: 1e-6 } });
+		// Results are rounded to the nanometre, which is 4e-8 in.
+		const room = Math.max(entry.tolerance.value ?? 0, 4e-8);
+		expectWithin(sums[kind]() / inch, { ...entry, tolerance: { kind: 'absolute', value: room } });
 	});
 });
 
@@ -63,6 +65,23 @@ describe('a grid of diameters', () => {
 		expect(taperMm([[40, 40]]).ok).toBe(false);
 		expect(outOfRoundMm([[Number.NaN, 40]]).ok).toBe(false);
 		expect(oilClearance([[40]], [[40.01]]).ok).toBe(false);
+	});
+	it('gives a number or a reason, never NaN, whatever is typed', () => {
+		const cell = fc.option(fc.double());
+		const anything = fc.array(fc.array(cell, { maxLength: 3 }), { maxLength: 3 });
+		fc.assert(
+			fc.property(anything, anything, (a, b) => {
+				for (const found of [outOfRoundMm(a), taperMm(a), leastMm(a), mostMm(a)])
+					expect(found.ok ? Number.isFinite(found.value) : found.because !== '').toBe(true);
+				const clearance = oilClearance(a, b);
+				if (clearance.ok) expect(Object.values(clearance.value).every(Number.isFinite)).toBe(true);
+			}),
+			{ numRuns: 500 }
+		);
+		expect(taperMm([[40, 40], [40]])).toEqual({
+			ok: false,
+			because: 'each depth is measured in the same planes'
+		});
 	});
 	it('orders least, mean and most', () => {
 		fc.assert(

@@ -46,6 +46,50 @@ describe('a ruling by ISO 14253-1, guard band U on both sides', () => {
 			})
 		);
 	});
+	it('says why and what to do next, for each question and ruling', () => {
+		const said = (['build', 'run-again'] as const).flatMap((question) =>
+			[0.05, 0.068, 0.09].map((value) => {
+				const found = ruleReading({ question, value, expandedUncertainty: 0.005, most: 0.07 });
+				if (!found.ok) throw new Error(found.because);
+				return found.value;
+			})
+		);
+		expect(said.map(({ ruling }) => ruling)).toEqual(
+			[0, 1].flatMap(() => ['within', 'too-close', 'out'])
+		);
+		for (const { because, next, guardBand } of said) {
+			expect(because).toMatch(/^[A-Z].+\.$/);
+			expect(next).toMatch(/^[A-Z].+\.$/);
+			expect(guardBand).toBe(0.005);
+		}
+		// What to do differs by the question, except that nobody decides on a reading too close to call.
+		expect(new Set(said.map(({ next }) => next)).size).toBe(5);
+	});
+	it('calls nothing within where the limits are closer than twice the uncertainty', () => {
+		fc.assert(
+			fc.property(fc.integer({ min: 0, max: 100 }), (off) => {
+				expect(rule(off / 1000, 0.006, { least: 0.04, most: 0.05 })).not.toBe('within');
+			})
+		);
+	});
+	it('gives a ruling or a reason for any figures', () => {
+		const any = fc.option(fc.double(), { nil: undefined });
+		fc.assert(
+			fc.property(fc.double(), fc.double(), any, any, (value, u, least, most) => {
+				const found = ruleReading({
+					question: 'build',
+					value,
+					expandedUncertainty: u,
+					least,
+					most
+				});
+				const numbers = [value, u, least ?? 0, most ?? 0].every(Number.isFinite);
+				if (!numbers) expect(found.ok).toBe(false);
+				else if (found.ok) expect(found.value.because).not.toBe('');
+			}),
+			{ numRuns: 500 }
+		);
+	});
 	it('refuses what cannot be ruled', () => {
 		expect(ruleReading({ question: 'build', value: 1, expandedUncertainty: 0.1 }).ok).toBe(false);
 		expect(
@@ -64,6 +108,14 @@ describe('uncertainty', () => {
 	it('of a difference carries both readings (JCGM 100:2008, 5.1.2)', () => {
 		expect(ofDifferenceMm(0.003, 0.004)).toBeCloseTo(0.005, 12);
 		expect(expandedMm(0.005)).toBe(0.01);
+	});
+	it('refuses what is no uncertainty', () => {
+		for (const bad of [-0.001, Number.NaN, Infinity]) {
+			expect(() => expandedMm(bad)).toThrow(RangeError);
+			expect(() => ofDifferenceMm(0.001, bad)).toThrow(RangeError);
+			expect(() => standardUncertaintyMm(0.01, bad)).toThrow(RangeError);
+			expect(() => standardUncertaintyMm(bad, 0)).toThrow(RangeError);
+		}
 	});
 	it('grows with least count and with calibration', () => {
 		fc.assert(

@@ -33,10 +33,17 @@ export function watchedS(merged: readonly Interval[]): number {
 
 /**
  * The share of a film that was watched, 0 to 1; a film without length is all watched.
+ *
+ * @param merged from `mergeIntervals`; what lies past the end counts for nothing
+ * @param lengthS seconds
+ * @throws RangeError where the length is no number
  * @example coverage([[0, 50]], 100) // 0.5
  */
 export function coverage(merged: readonly Interval[], lengthS: number): number {
-	return lengthS <= 0 ? 1 : Math.min(1, watchedS(merged) / lengthS);
+	if (!Number.isFinite(lengthS)) throw new RangeError('a film has a length');
+	if (lengthS <= 0) return 1;
+	const inside = merged.map(([from, to]): Interval => [from, Math.min(to, lengthS)]);
+	return Math.min(1, watchedS(inside.filter(([from, to]) => to > from)) / lengthS);
 }
 
 /**
@@ -46,7 +53,7 @@ export function coverage(merged: readonly Interval[], lengthS: number): number {
 export function gaps(merged: readonly Interval[], lengthS: number): [number, number][] {
 	const out: [number, number][] = [];
 	let at = 0;
-	for (const [from, to] of merged) {
+	for (const [from, to] of merged.filter(([from]) => from < lengthS)) {
 		if (from - at > 1) out.push([at, from]);
 		at = Math.max(at, to);
 	}

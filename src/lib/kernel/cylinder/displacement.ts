@@ -10,5 +10,7 @@
 export function displacementCm3(boreMm: number, strokeMm: number, cylinders = 1): number {
 	if (!(boreMm > 0) || !(strokeMm > 0) || !Number.isInteger(cylinders) || cylinders < 1)
 		throw new RangeError('bore, stroke and a whole number of cylinders');
-	return ((Math.PI / 4) * boreMm ** 2 * strokeMm * cylinders) / 1000;
+	const volumeMm3 = (Math.PI / 4) * boreMm ** 2 * strokeMm * cylinders;
+	if (!Number.isFinite(volumeMm3)) throw new RangeError('no engine is that large');
+	return volumeMm3 / 1000;
 }

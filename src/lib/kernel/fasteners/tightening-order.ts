@@ -11,6 +11,10 @@ export type Bolt = { id: string; xMm: number; yMm: number };
  */
 export function orderFromMiddle(bolts: readonly Bolt[]): Outcome<string[]> {
 	if (bolts.length < 2) return cannot('a pattern has at least two bolts');
+	if (bolts.some(({ xMm, yMm }) => !Number.isFinite(xMm + yMm)))
+		return cannot('each bolt has a place');
+	if (new Set(bolts.map(({ id }) => id)).size < bolts.length)
+		return cannot('a bolt is named twice');
 	const mid = {
 		x: mean(bolts.map((one) => one.xMm)),
 		y: mean(bolts.map((one) => one.yMm))
@@ -52,8 +56,9 @@ export function firstWrongStep(
 ): Outcome<Departure | null> {
 	if (new Set(given).size < given.length) return cannot('a bolt is named twice');
 	if (given.some((id) => !wanted.includes(id))) return cannot('there is no such bolt');
-	if (given.length < wanted.length)
-		return cannot(`${wanted.length - given.length} bolts are missing`);
+	const missing = wanted.length - given.length;
+	if (missing > 0)
+		return cannot(missing === 1 ? '1 bolt is missing' : `${missing} bolts are missing`);
 	const at = wanted.findIndex((id, step) => given[step] !== id);
 	if (at < 0) return computed(null);
 	return computed({ step: at + 1, was: given[at] ?? '', wanted: wanted[at] ?? '' });

@@ -8,6 +8,7 @@
  * @example travelMm(90, 1.25) // 0.3125
  */
 export function travelMm(angleDeg: number, pitchMm: number): number {
-	if (!(angleDeg >= 0) || !(pitchMm > 0)) throw new RangeError('an angle and a pitch above zero');
+	if (!(angleDeg >= 0) || !(pitchMm > 0) || !Number.isFinite(pitchMm * angleDeg))
+		throw new RangeError('an angle and a pitch above zero');
 	return (pitchMm * angleDeg) / 360;
 }

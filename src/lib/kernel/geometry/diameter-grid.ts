@@ -6,6 +6,9 @@ import { cannot, computed, type Outcome } from '../outcome';
  */
 export type DiameterGrid = readonly (readonly (number | null)[])[];
 
+/** A hundred metres. */
+const largestMm = 1e5;
+
 /** All readings of a grid, or why it cannot be used. */
 export function readingsOf(grid: DiameterGrid): Outcome<number[]> {
 	const readings = grid.flat();
@@ -13,8 +16,12 @@ export function readingsOf(grid: DiameterGrid): Outcome<number[]> {
 	if (taken.length === 0) return cannot('no reading is taken yet');
 	if (taken.length < readings.length)
 		return cannot(`${readings.length - taken.length} of ${readings.length} readings are missing`);
+	if (grid.some((row) => row.length !== grid[0]?.length))
+		return cannot('each depth is measured in the same planes');
 	if (taken.some((one) => !Number.isFinite(one) || one <= 0))
 		return cannot('a diameter is a number above zero');
+	// Sums of readings must stay numbers too.
+	if (taken.some((one) => one > largestMm)) return cannot('no part on this bench is that large');
 	return computed(taken);
 }
 
@@ -53,13 +60,19 @@ export function taperMm(grid: DiameterGrid): Outcome<number> {
 	return computed(tidy(Math.max(...planes.map((one) => Math.max(...one) - Math.min(...one)))));
 }
 
-/** The smallest reading, mm: what a worn journal has left. */
+/**
+ * The smallest reading, mm: what a worn journal has left.
+ * @example leastMm([[39.996, 39.981]]) // 39.981
+ */
 export function leastMm(grid: DiameterGrid): Outcome<number> {
 	const all = readingsOf(grid);
 	return all.ok ? computed(Math.min(...all.value)) : all;
 }
 
-/** The largest reading, mm: how far a bore has worn. */
+/**
+ * The largest reading, mm: how far a bore has worn.
+ * @example mostMm([[74.012, 74.031]]) // 74.031
+ */
 export function mostMm(grid: DiameterGrid): Outcome<number> {
 	const all = readingsOf(grid);
 	return all.ok ? computed(Math.max(...all.value)) : all;

@@ -19,7 +19,9 @@ export type Limits = { least?: number; most?: number };
  * value > most + U; otherwise too close to call.
  * @param asked value, expanded uncertainty (k = 2) and limits in one unit
  * @returns the ruling with its reason and what to do next
- * Source: ISO 14253-1:2017 (proving conformity and non-conformity), guard band g = U.
+ * Source: ISO 14253-1 (proving conformity and non-conformity) with guard band g = U, as in its
+ * editions up to 2013; the default of 2017, 95 % probability, would be satisfied with g = 1.65 u.
+ * The wider band is kept: it is the one that workshops know, and it errs towards measuring again.
  * @example ruleReading({ question: 'run-again', value: 0.068, expandedUncertainty: 0.005,
  *   most: 0.07 }) // too close to call
  */
@@ -30,6 +32,7 @@ export function ruleReading(
 	if (least === undefined && most === undefined) return cannot('there is no limit to rule by');
 	if (least !== undefined && most !== undefined && most < least)
 		return cannot('the least limit lies above the most');
+	if (![least ?? 0, most ?? 0].every(Number.isFinite)) return cannot('a limit is no number');
 	if (![value, guardBand].every(Number.isFinite) || guardBand < 0)
 		return cannot('the reading or its uncertainty is no number');
 	const under = least === undefined ? -Infinity : least - value;

@@ -13,22 +13,39 @@ export const coverageFactor = 2;
  * @example standardUncertaintyMm(0.01, 0.002) // 0.00306
  */
 export function standardUncertaintyMm(leastCountMm: number, calibrationExpandedMm: number): number {
-	if (!(leastCountMm > 0) || !(calibrationExpandedMm >= 0))
-		throw new RangeError('a least count above zero, a calibration uncertainty of zero or more');
-	return Math.sqrt(leastCountMm ** 2 / 12 + (calibrationExpandedMm / coverageFactor) ** 2);
+	if (!(leastCountMm > 0)) throw new RangeError('a least count is above zero');
+	return combined(leastCountMm / Math.sqrt(12), calibrationExpandedMm / coverageFactor);
 }
 
 /**
  * Standard uncertainty of a difference of two independent readings: both count.
  *
- * Formula: u² = a² + b². Source: JCGM 100:2008, 5.1.2 with sensitivities +1 and −1.
+ * Formula: u² = a² + b².
+ * @param aMm, bMm standard uncertainties, mm, zero or more
+ * @returns mm
+ * Source: JCGM 100:2008, 5.1.2 with sensitivities +1 and −1.
  * @example ofDifferenceMm(0.003, 0.004) // 0.005
  */
 export function ofDifferenceMm(aMm: number, bMm: number): number {
-	return Math.hypot(aMm, bMm);
+	return combined(aMm, bMm);
 }
 
-/** Expanded uncertainty U = k·u with k = 2, mm. Source: JCGM 100:2008, 6.2.1. */
+/**
+ * Expanded uncertainty, for about 95 %.
+ *
+ * Formula: U = k · u, k = 2.
+ * @param standardMm standard uncertainty u, mm
+ * @returns mm
+ * Source: JCGM 100:2008, 6.2.1.
+ * @example expandedMm(0.005) // 0.01
+ */
 export function expandedMm(standardMm: number): number {
-	return coverageFactor * standardMm;
+	return coverageFactor * combined(standardMm, 0);
+}
+
+function combined(a: number, b: number): number {
+	const u = Math.hypot(a, b);
+	if (!(a >= 0) || !(b >= 0) || !Number.isFinite(u))
+		throw new RangeError('an uncertainty is a number, zero or more');
+	return u;
 }

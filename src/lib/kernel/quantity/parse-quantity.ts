@@ -1,41 +1,19 @@
 import { cannot, computed, type Outcome } from '../outcome';
+import { spellings } from './spellings';
 import { dimensions, type DimensionName } from './units';
 
 export type Quantity = { value: number; unit: string };
 
-/** How people write the units that we know, by dimension. */
-const spellings: Record<DimensionName, readonly (readonly [RegExp, string])[]> = {
-	length: [
-		[/^(mm|millimet(er|re)s?)$/i, 'mm'],
-		[/^(µm|μm|um|microns?)$/i, 'µm'],
-		[/^(in|inch|inches|")$/i, 'in'],
-		[/^(thou|mil|mils)$/i, 'thou']
-	],
-	torque: [
-		[/^(n[·.\s-]?m)$/i, 'N·m'],
-		[/^((lbf?|pounds?)[·.\s-]?(ft|feet|foot)|(ft|foot)[·.\s-]?(lbf?s?|pounds?))$/i, 'lbf·ft'],
-		[/^((lbf?)[·.\s-]?(in)|(in)[·.\s-]?(lbf?s?))$/i, 'lbf·in'],
-		[/^(kgf?[·.\s-]?m|m[·.\s-]?kgf?)$/i, 'kgf·m']
-	],
-	force: [
-		[/^n$/i, 'N'],
-		[/^kn$/i, 'kN'],
-		[/^lbf?$/i, 'lbf'],
-		[/^kgf?$/i, 'kgf']
-	],
-	pressure: [
-		[/^mpa$/i, 'MPa'],
-		[/^kpa$/i, 'kPa'],
-		[/^bar$/i, 'bar'],
-		[/^psi$/i, 'psi']
-	]
-};
+/** Units in which nobody has a thousand of anything on this bench, so a comma is a decimal mark. */
+const neverThousands = ['mm', 'in'];
 
 /**
  * A value with its unit as a person types it: "0,045 mm", "1.5 thou", "18 ft-lb".
  *
+ * @param typed comma or point as the one decimal mark, spaces between groups of three
  * @param fallback the unit meant when none is typed; without one, a bare number is refused
- * @returns value and unit as typed, not converted; "cannot" with the reason
+ * @returns value and unit as typed, not converted; "cannot" with the reason, also where it could
+ *   mean two things: "1,250 psi", "1,234.5 mm", "40.01 40.02"
  * @example parseQuantity('18 ft-lb', 'torque') // { value: 18, unit: 'lbf·ft' }
  */
 export function parseQuantity(
@@ -43,24 +21,38 @@ export function parseQuantity(
 	dimension: DimensionName,
 	fallback?: string
 ): Outcome<Quantity> {
-	const found = /^([+-]?[\d.,\s]*\d)\s*(.*)$/.exec(typed.trim().replace(/\u2212/g, '-'));
+	const found = /^([+-]?\s*[\d.,\s]*\d)\s*(.*)$/s.exec(
+		typed.trim().replace(/[\u2212\u2013]/g, '-')
+	);
 	if (!found) return cannot('there is no number in it');
-	const value = numberIn((found[1] ?? '').replace(/\s/g, ''));
-	if (value === undefined) return cannot('it can be read in two ways: write one decimal mark only');
 	const words = (found[2] ?? '').trim();
-	if (words === '')
-		return fallback ? computed({ value, unit: fallback }) : cannot('say the unit as well');
-	const unit = spellings[dimension].find(([pattern]) => pattern.test(words))?.[1];
+	if (/^\/\s*\d/.test(words)) return cannot('write the fraction as a decimal, such as 0.375');
+	const unit = words === '' ? fallback : unitIn(words, dimension);
 	if (!unit)
 		return cannot(
-			`“${words}” is no unit of ${dimension}: use ${Object.keys(dimensions[dimension]).join(', ')}`
+			words === ''
+				? 'say the unit as well'
+				: `“${words}” is no unit of ${dimension}: use ${Object.keys(dimensions[dimension]).join(', ')}`
 		);
-	return computed({ value, unit });
+	const value = numberIn(found[1] ?? '', unit);
+	return value.ok ? computed({ value: value.value, unit }) : value;
 }
 
-/** One decimal mark, comma or point. Both in one number could mean two things. */
-function numberIn(text: string): number | undefined {
-	if ((text.match(/[.,]/g) ?? []).length > 1) return undefined;
-	const value = Number(text.replace(',', '.'));
-	return Number.isFinite(value) ? value : undefined;
+function unitIn(words: string, dimension: DimensionName): string | undefined {
+	return spellings[dimension].find(([pattern]) => pattern.test(words))?.[1];
+}
+
+function numberIn(written: string, unit: string): Outcome<number> {
+	const text = written.replace(/^([+-])\s+/, '$1');
+	if (/\s/.test(text) && !/^[+-]?\d{1,3}(\s\d{3})+([.,]\d+)?$/.test(text))
+		return cannot('there is more than one number in it');
+	const digits = text.replace(/\s/g, '');
+	if ((digits.match(/[.,]/g) ?? []).length > 1)
+		return cannot('it can be read in two ways: write one decimal mark only');
+	if (/^[+-]?[1-9]\d{0,2},\d{3}$/.test(digits) && !neverThousands.includes(unit))
+		return cannot(
+			`it can be read in two ways: write ${digits.replace(',', '')} or ${digits.replace(',', '.')}`
+		);
+	const value = Number(digits.replace(',', '.'));
+	return Number.isFinite(value) ? computed(value) : cannot('the number is too large');
 }

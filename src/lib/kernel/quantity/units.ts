@@ -31,6 +31,10 @@ export type UnitOf<D extends DimensionName> = keyof (typeof dimensions)[D] & str
 
 /**
  * Converts between two units of one dimension.
+ *
+ * Formula: x · f(from) / f(to), with the factors above.
+ * @throws RangeError where the value is no number or a unit is of another dimension
+ * Source: as the factors.
  * @example convert('torque', 18, 'lbf·ft', 'N·m') // 24.405
  */
 export function convert<D extends DimensionName>(
@@ -41,7 +45,7 @@ export function convert<D extends DimensionName>(
 ): number {
 	const factors = dimensions[dimension] as unknown as Record<string, number>;
 	const [a, b] = [factors[from], factors[to]];
-	if (a === undefined || b === undefined || !Number.isFinite(value))
-		throw new RangeError(`no conversion from ${from} to ${to}`);
-	return (value * a) / b;
+	const converted = a === undefined || b === undefined ? Number.NaN : (value * a) / b;
+	if (!Number.isFinite(converted)) throw new RangeError(`no conversion from ${from} to ${to}`);
+	return converted;
 }

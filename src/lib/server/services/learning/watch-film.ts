@@ -45,7 +45,7 @@ export const watchFilm = writeCase({
 			throw inputProblem({ intervals: ['A stretch ends after it begins, within the film.'] });
 		const held = await watchRecord(scope, enrolment.id, revision.publicationId, input.filmHash);
 		const clipped = input.intervals.map(([from, to]): [number, number] => [
-			from,
+			Math.min(from, length),
 			Math.min(to, length)
 		]);
 		const intervals = mergeIntervals([...(held?.intervals ?? []), ...clipped]);

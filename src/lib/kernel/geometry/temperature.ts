@@ -1,0 +1,47 @@
+import { computedNumber } from '../computed-number';
+import { cannot, type Outcome } from '../outcome';
+
+/** Linear expansion a kelvin, such as 11.5e-6 for steel, and degrees away from 20 °C. */
+export type Growth = { expansionPerK: number; riseK: number };
+
+/** The temperature at which sizes are printed. Source: ISO 1:2022. */
+export const referenceC = 20;
+
+/**
+ * How much more the outer of two bodies of one size has grown than the inner.
+ *
+ * Formula: Δ = L · (αo · ΔTo − αi · ΔTi).
+ * @param lengthMm common size L, mm @param outer, inner expansion 1/K, rise from 20 °C in K
+ * @returns mm; below zero where the inner has grown more
+ * Source: definition of linear expansion, first order.
+ * @example growthApartMm(80, { expansionPerK: 10.8e-6, riseK: 60 },
+ *   { expansionPerK: 20e-6, riseK: 60 }) // -0.0442
+ */
+export function growthApartMm(lengthMm: number, outer: Growth, inner: Growth): Outcome<number> {
+	if (!(lengthMm > 0)) return cannot('a size is a number above zero');
+	return computedNumber(
+		lengthMm * (outer.expansionPerK * outer.riseK - inner.expansionPerK * inner.riseK)
+	);
+}
+
+/**
+ * A reading brought to 20 °C, part minus instrument: a warm part has grown, a warm scale reads
+ * short.
+ *
+ * Formula: L20 = L · (1 + αs · (Ts − 20) − αp · (Tp − 20)).
+ * @param readMm reading, mm @param part, instrument expansion 1/K and temperature °C
+ * @returns mm
+ * Source: ISO 1:2022 (20 °C); first order in the expansions.
+ * @example at20Mm(74.02, { expansionPerK: 10.8e-6, temperatureC: 35 },
+ *   { expansionPerK: 11.5e-6, temperatureC: 20 }) // 74.008
+ */
+export function at20Mm(readMm: number, part: Body, instrument: Body): Outcome<number> {
+	const apart = growthApartMm(readMm, growthOf(instrument), growthOf(part));
+	return apart.ok ? computedNumber(readMm + apart.value) : apart;
+}
+
+export type Body = { expansionPerK: number; temperatureC: number };
+
+function growthOf({ expansionPerK, temperatureC }: Body): Growth {
+	return { expansionPerK, riseK: temperatureC - referenceC };
+}
