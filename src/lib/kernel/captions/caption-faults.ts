@@ -24,7 +24,7 @@ export function captionFaults(
 			...fault
 		}))
 	);
-	const endS = Math.max(...cues.map((one) => one.endS));
+	const endS = Math.max(...cues.map((one) => one.endS).filter(Number.isFinite));
 	if (filmS !== undefined && endS > filmS + rules.pastEndS + dustS)
 		faults.push({
 			cue: cues.findIndex((one) => one.endS === endS) + 1,
@@ -39,6 +39,8 @@ function ofNeighbours(
 	rules: CaptionRules
 ): Found[] {
 	const gapS = cue.startS - (before?.endS ?? 0);
+	// A time that is no number is a fault of its own caption.
+	if (!Number.isFinite(gapS)) return [];
 	if (before && cue.startS < before.startS)
 		return [found('order', 'error', 'It begins before the one above it.')];
 	if (before && gapS < -dustS)

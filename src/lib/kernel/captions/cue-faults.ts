@@ -14,8 +14,7 @@ export function cueFaults(cue: CaptionCue, rules: CaptionRules): Found[] {
 
 function ofTime(cue: CaptionCue, rules: CaptionRules): Found[] {
 	const lengthS = cue.endS - cue.startS;
-	if (!(lengthS > 0) || !Number.isFinite(lengthS))
-		return [found('end-after-start', 'error', 'It must end after it begins.')];
+	if (!lasts(cue)) return [found('end-after-start', 'error', 'It must end after it begins.')];
 	if (lengthS < rules.leastS - dustS)
 		return [found('min-duration', 'warning', `It stands for less than ${rules.leastS} s.`)];
 	if (lengthS > rules.mostS + dustS)
@@ -49,7 +48,7 @@ function ofText(cue: CaptionCue, rules: CaptionRules): Found[] {
 
 function ofSpeed(cue: CaptionCue, rules: CaptionRules): Found[] {
 	// A cue that lasts no time is reported as that.
-	if (!(cue.endS > cue.startS) || !Number.isFinite(cue.endS - cue.startS)) return [];
+	if (!lasts(cue)) return [];
 	const [characters, words] = [charactersPerSecond(cue), wordsPerMinute(cue)];
 	const fast = (level: CaptionFault['level'], says: string) => [
 		found('reading-speed', level, `${says}: give it more time or fewer words.`)
@@ -62,4 +61,9 @@ function ofSpeed(cue: CaptionCue, rules: CaptionRules): Found[] {
 	return words > rules.wordsPerMinute + dustS
 		? fast('warning', `${Math.round(words)} words a minute`)
 		: [];
+}
+
+/** A file tells times to the millisecond; what is shorter than one lasts no time. */
+function lasts({ startS, endS }: CaptionCue): boolean {
+	return Number.isFinite(endS - startS) && endS - startS > 0.001 - dustS;
 }
