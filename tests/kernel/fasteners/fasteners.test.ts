@@ -139,6 +139,12 @@ describe('stress areas and loads, published tables', () => {
 			{ numRuns: 500 }
 		);
 	});
+	it('the metric diameters are those of the profile: d2 = d − 3/4 H, d3 = d − 17/12 H, H = √3/2 P', () => {
+		// ISO 68-1 (H, and d2 at 3/8 H a side) and ISO 898-1 (d3 = d1 − H/6, d1 = d − 5/4 H).
+		const h = (Math.sqrt(3) / 2) * 1.5;
+		const mean = (10 - 0.75 * h + (10 - (17 / 12) * h)) / 2;
+		expect(value(stressAreaMm2(10, 1.5))).toBeCloseTo((Math.PI / 4) * mean ** 2, 4);
+	});
 	it('refuses threads that cannot be cut', () => {
 		for (const [d, p] of [
 			[0, 1],

@@ -63,6 +63,11 @@ describe('chance that can be had again', () => {
 			})
 		);
 	});
+	it('between two neighbouring numbers gives the lower one', () => {
+		const random = seeded('narrow');
+		const drawn = Array.from({ length: 50 }, () => random.between(1, 1 + Number.EPSILON));
+		expect(new Set(drawn)).toEqual(new Set([1]));
+	});
 	it('spreads evenly: chi-square of ten bins under 27.88, the 99.9 % point for 9 degrees of freedom', () => {
 		const bins = Array<number>(10).fill(0);
 		const random = seeded('even');
