@@ -79,7 +79,7 @@ test('a school admin enrols a cohort: places by card, a list, letters, students'
 		).toBeVisible();
 		await page.getByRole('button', { name: 'Write 3 and invite 2' }).click();
 		await expect(
-			page.getByText('3 added. 2 invited by e-mail. 1 wait until places are paid.')
+			page.getByText('3 added. 2 invited by e-mail. 1 waits until places are paid.')
 		).toBeVisible();
 	});
 

@@ -24,6 +24,8 @@ export const inviteAgain = writeCase({
 	async run({ subject: { entry, cohort }, ...work }) {
 		if (entry.state !== 'invited')
 			throw new Problem('conflict', '{name} has no open invitation.', { name: entry.name });
+		const invitedAt = work.at.toISOString();
+		await update(work.scope, rosterEntries, { id: entry.id }, { invitedAt });
 		await sendInvitation(work, cohort, entry);
 		return { sentTo: entry.email };
 	}
