@@ -60,7 +60,7 @@ export const homes: readonly { packages: RegExp; at: RegExp }[] = [
 	{ packages: /^(sequelize|sqlite3|umzug)(\/|$)/, at: /^src\/lib\/server\/data\// },
 	{ packages: /^stripe(\/|$)/, at: /^src\/lib\/server\/gateways\/stripe\// },
 	{ packages: /^nodemailer(\/|$)/, at: /^src\/lib\/server\/gateways\/mail\// },
-	{ packages: /^sharp(\/|$)/, at: /^src\/lib\/server\/gateways\/images\// },
+	{ packages: /^sharp(\/|$)/, at: /^src\/(lib\/server\/gateways\/images|bin\/films)\// },
 	{ packages: /^pdfkit(\/|$)/, at: /^src\/lib\/server\/gateways\/pdf\// },
 	{ packages: /^qrcode(\/|$)/, at: /^src\/lib\/server\/gateways\/(qr|pdf)\// },
 	{ packages: /^@node-rs\/argon2$/, at: /^src\/lib\/server\/gateways\/passwords\// },

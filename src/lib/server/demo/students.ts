@@ -40,7 +40,7 @@ export const averholmStudents: readonly Plan[] = [
 		then: 'waiting',
 		benchHours: 11
 	},
-	{ email: 'farida@averholm.example', name: 'Farida Holm', done: 2, then: 'begun', benchHours: 3 },
+	{ email: 'farida@averholm.example', name: 'Farida Holm', done: 3, then: 'begun', benchHours: 3 },
 	{
 		email: 'jonas@averholm.example',
 		name: 'Jonas Pereyra',

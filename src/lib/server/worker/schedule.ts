@@ -31,6 +31,7 @@ async function dueAt(scope: ReturnType<typeof commonScope>, minute: string): Pro
 	const slots: Slot[] = [
 		{ kind: 'sign-ledger-heads', payload: { day }, id: `sign-ledger-heads:${day}` },
 		{ kind: 'forget-expired', payload: {}, id: `forget-expired:${day}` },
+		{ kind: 'sweep-files', payload: {}, id: `sweep-files:${day}` },
 		{ kind: 'end-overdue-sittings', payload: {}, id: `end-overdue-sittings:${minute}` }
 	];
 	// A webhook can be lost: a checkout that no word came of is asked after every ten minutes.

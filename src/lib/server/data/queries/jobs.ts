@@ -28,14 +28,16 @@ export async function enqueueJob(scope: Scope, job: NewJob, newId: string, at: D
 	});
 }
 
+/** Somebody waits for these: they go before work that only has to be done some time. */
+const waitedFor = ['send-mail', 'settle-payment'];
+
 /** Takes the job that has waited longest, or none. One atomic change: two workers never share one. */
 export async function takeJob(scope: Scope, at: Date) {
-	const due = await find(
-		acrossSchools(scope),
-		jobs,
-		{ state: 'waiting', runAt: { atMost: at.toISOString() } },
-		{ order: [['runAt', 'asc']] }
-	);
+	const waiting = { state: 'waiting' as const, runAt: { atMost: at.toISOString() } };
+	const longest = { order: [['runAt', 'asc']] as [['runAt', 'asc']] };
+	const due =
+		(await find(acrossSchools(scope), jobs, { ...waiting, kind: waitedFor }, longest)) ??
+		(await find(acrossSchools(scope), jobs, waiting, longest));
 	if (!due) return undefined;
 	const taken = await update(
 		acrossSchools(scope),

@@ -9,6 +9,7 @@ import { copyPhotograph } from '../../services/submissions/copy-photograph';
 import type { Caller } from '../../services/use-case';
 import { sendMail } from './send-mail';
 import { signLedgerHeads } from './sign-ledger-heads';
+import { sweepFiles } from './sweep-files';
 
 /** One line a kind of job. Each can be run again: it asks first what is already done. */
 export type Handler = (
@@ -19,6 +20,7 @@ export type Handler = (
 
 export const handlers: Record<string, Handler> = {
 	'send-mail': sendMail,
+	'sweep-files': sweepFiles,
 	'sign-ledger-heads': signLedgerHeads,
 	'send-account-link': asSystem(sendAccountLink),
 	'forget-expired': asSystem(forgetExpired),
