@@ -1,6 +1,6 @@
 import { sveltekit } from '@sveltejs/kit/vite';
 import { defineConfig } from 'vitest/config';
-import { childSource } from './child-source.ts';
+import { childSource } from './src/bin/child-source.ts';
 
 export default defineConfig({
 	plugins: [childSource(), sveltekit()],

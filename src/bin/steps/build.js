@@ -24,7 +24,6 @@ const sources = [
 	'mdsvex.config.js',
 	'postcss.config.js',
 	'tailwind.config.ts',
-	'child-source.ts',
 	'tsconfig.json'
 ];
 
