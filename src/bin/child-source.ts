@@ -33,7 +33,7 @@ async function bundled(entry: string): Promise<{ code: string; files: string[] }
 		configFile: false,
 		envFile: false,
 		logLevel: 'error',
-		resolve: { alias: { $lib: fileURLToPath(new URL('./src/lib', import.meta.url)) } },
+		resolve: { alias: { $lib: fileURLToPath(new URL('../lib', import.meta.url)) } },
 		build: {
 			ssr: entry,
 			write: false,
