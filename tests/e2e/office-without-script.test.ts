@@ -1,6 +1,6 @@
-import { expect, expectAccessible, signIn, test } from './support/test';
+import { expect, signIn, test } from './support/test';
 import { rowsOf } from './support/rows';
-import { isTooWide, screenshots } from './support/screenshots';
+import { screenshots } from './support/screenshots';
 
 test('the office enrols from a list without JavaScript', async ({ openContext }) => {
 	const page = await (await openContext({ javaScriptEnabled: false })).newPage();
@@ -73,31 +73,6 @@ test('the ledger is taken away as a file', async ({ as }) => {
 	]);
 	expect(download.suggestedFilename()).toMatch(/^ledger-averholm-\d+\.jsonl$/);
 });
-
-const pages: Record<string, string[]> = {
-	'office@averholm.example': ['cohorts', 'mail', 'ledger'],
-	'verifier@averholm.example': ['awards', 'ledger'],
-	'ines@averholm.example': ['certificates']
-};
-for (const [who, names] of Object.entries(pages))
-	test(`pages of ${who} fit a phone and can be used by all`, async ({ as }) => {
-		const page = await as(who);
-		const seen = [...names];
-		const look = async (path: string) => {
-			await page.goto(path);
-			await page.setViewportSize({ width: 360, height: 800 });
-			expect(await isTooWide(page), path).toBe(false);
-			await expectAccessible(page);
-			await screenshots(page, path.replaceAll('/', '_').slice(0, 40));
-		};
-		for (const name of seen) await look(`/s/averholm/${name}`);
-		for (const name of names.filter((one) => ['cohorts', 'awards'].includes(one))) {
-			await page.goto(`/s/averholm/${name}`);
-			const links = page.locator(`main a[href^="/s/averholm/${name}/"]`);
-			const hrefs = await links.evaluateAll((all) => all.map((one) => one.getAttribute('href')));
-			for (const href of hrefs.slice(0, 3)) if (href) await look(href);
-		}
-	});
 
 test('public pages fit a phone and can be used by all, without JavaScript', async ({
 	openContext,
