@@ -1,4 +1,5 @@
 import { expect, expectAccessible, test } from './support/test';
+import { screenshots } from './support/screenshots';
 
 const office = 'office@averholm.example';
 
@@ -89,6 +90,7 @@ test('a school admin enrols a cohort: places by card, a list, letters, students'
 		await anna.goto(link);
 		await expect(anna.getByText('Averholm Trade School').first()).toBeVisible();
 		await expectAccessible(anna);
+		await screenshots(anna, 'invitation');
 		await anna.reload();
 		await anna.getByLabel('Password').first().fill('short');
 		await anna
