@@ -1,9 +1,9 @@
 import type { z } from 'zod';
 import type { Outcome } from '$lib/kernel/outcome';
+import type { Step } from '../working';
 import type { SheetFigures } from './sheet-figures';
 
-/** One line of the working that is shown after the response: words first, figures beside them. */
-export type Step = { words: string; formula?: string; value?: number; unit?: string };
+export type { Step };
 
 export type Score = {
 	/** 0 to 1; part credit only where the kind states its rule on the face. */
