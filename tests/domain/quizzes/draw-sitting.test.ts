@@ -85,3 +85,15 @@ describe('a sitting', () => {
 it('a line to draw names an outcome, a kind or both', () => {
 	expect(quizSchema.safeParse({ ...quiz, plan: [{ draw: 2 }] }).success).toBe(false);
 });
+
+it('draws no question that is for practice only, and takes it where the plan names it', () => {
+	const pool = [
+		{ key: 'a', outcome: 'o', kind: 'single-choice' },
+		{ key: 'b', outcome: 'o', kind: 'single-choice', practiceOnly: true }
+	] as const;
+	const plan = (lines: Parameters<typeof drawSitting>[0]['plan']) =>
+		drawSitting({ plan: lines, order: 'as-planned' }, pool, 'seed');
+	expect(plan([{ draw: 2, outcome: 'o' }]).ok).toBe(false);
+	const named = plan([{ question: 'b' }, { draw: 1, outcome: 'o' }]);
+	expect(named.ok && named.value.map((one) => one.key)).toEqual(['b', 'a']);
+});

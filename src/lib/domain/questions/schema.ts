@@ -18,7 +18,9 @@ const envelope = {
 	/** Where to read again: the lesson's key and a heading's anchor in it. */
 	readAgain: z.strictObject({ lesson: slug, anchor: slug }),
 	/** The data sheet that its figures come from, such as `av3-1150`. */
-	sheet: slug.optional()
+	sheet: slug.optional(),
+	/** Never drawn by a quiz's plan: asked in practice, or by a quiz that names it. */
+	practiceOnly: z.literal(true).optional()
 };
 
 export const questionSchema = z.discriminatedUnion('kind', [

@@ -4,7 +4,7 @@ import type { KindName } from '../questions/kind-names';
 import type { Quiz, QuizLine } from './schema';
 
 /** A question that may be drawn: what a plan needs to know of it. */
-export type Drawable = { key: string; outcome: string; kind: KindName };
+export type Drawable = { key: string; outcome: string; kind: KindName; practiceOnly?: true };
 export type SittingItem = { place: number; key: string; seed: string };
 
 /**
@@ -48,6 +48,7 @@ export function drawSitting(
 
 function fits(line: Extract<QuizLine, { draw: number }>, one: Drawable): boolean {
 	return (
+		!one.practiceOnly &&
 		(line.outcome === undefined || line.outcome === one.outcome) &&
 		(line.kind === undefined || line.kind === one.kind)
 	);
