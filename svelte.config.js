@@ -27,9 +27,15 @@ const config = {
 	kit: {
 		adapter: adapter({ out: process.env.RINGLAND_BUILD_OUT ?? 'build', precompress: true }),
 		alias: { $lessons: 'lessons' },
+		// The crib's pages register it, for themselves alone.
+		serviceWorker: { register: false },
 		typescript: {
 			config: (made) => ({
 				...made,
+				// kit leaves the worker out of the project; here it is checked with the rest.
+				exclude: made.exclude.filter(
+					(/** @type {string} */ path) => !path.includes('service-worker')
+				),
 				include: [...made.include, '../lessons/**/*.svelte', '../*.config.ts', '../*.config.js']
 			})
 		},
