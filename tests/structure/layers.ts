@@ -70,11 +70,13 @@ export const homes: readonly { packages: RegExp; at: RegExp }[] = [
 		packages: /^(@sveltejs\/kit|\$app|\$service-worker)(\/|$)/,
 		at: /^src\/(lib\/server\/http|lib\/ui\/forms|lib\/client|routes|params|hooks\.|service-worker|app\.d\.ts)/
 	},
+	{ packages: /^@stdlib\//, at: /^src\/lib\/kernel\/statistics\/distributions\// },
 	{ packages: /^\$env\//, at: /^$/ }
 ];
 
 /** Packages that the pure layers may use: nothing that reads a clock, chance, files or a network. */
 export const pureAllowed: { readonly [L in 'kernel' | 'domain']: RegExp } = {
-	kernel: /^$/,
+	kernel:
+		/^@stdlib\/math-base-special-(betainc|digamma|erfc|erfcinv|gammainc|gammaincinv|gammaln|kernel-betaincinv)$/,
 	domain: /^(zod|canonicalize|csv-parse\/sync)$/
 };

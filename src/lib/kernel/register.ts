@@ -5,6 +5,7 @@ import type { Formula } from './formula';
 import { geometryFormulas } from './geometry/formulas';
 import { measurementFormulas } from './measurement/formulas';
 import { quantityFormulas } from './quantity/formulas';
+import { distributionFormulas } from './statistics/distributions/formulas';
 
 /**
  * Every formula of the kernel with its source and a worked example. A test runs each example and
@@ -16,5 +17,6 @@ export const register: readonly Formula[] = [
 	...geometryFormulas,
 	...measurementFormulas,
 	...cylinderFormulas,
-	...captionFormulas
+	...captionFormulas,
+	...distributionFormulas
 ];
