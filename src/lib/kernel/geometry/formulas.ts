@@ -1,7 +1,9 @@
 import type { Formula } from '../formula';
 import { outOfRoundMm, taperMm } from './diameter-grid';
+import { faceFormulas } from './formulas/faces';
+import { temperatureFormulas } from './formulas/temperature';
+import { valveFormulas } from './formulas/valves';
 import { oilClearance } from './oil-clearance';
-import { at20Mm, growthApartMm } from './temperature';
 import { wearMm } from './wear';
 
 const twoPlanes =
@@ -63,38 +65,7 @@ export const geometryFormulas: readonly Formula[] = [
 			within: 1e-6
 		}
 	},
-	{
-		id: 'geometry/growth-apart',
-		works: growthApartMm,
-		formula: 'Δ = L · (αo · ΔTo − αi · ΔTi)',
-		source: 'definition of linear expansion, first order',
-		example: {
-			says: 'an aluminium piston in an iron bore of 80 mm, both 60 K warmer',
-			gives: () =>
-				growthApartMm(
-					80,
-					{ expansionPerK: 10.8e-6, riseK: 60 },
-					{ expansionPerK: 20e-6, riseK: 60 }
-				),
-			wanted: -0.0442,
-			within: 0.00005
-		}
-	},
-	{
-		id: 'geometry/at-20',
-		works: at20Mm,
-		formula: 'L20 = L · (1 + αs · (Ts − 20) − αp · (Tp − 20))',
-		source: 'ISO 1:2022 (20 °C); first order in the expansions',
-		example: {
-			says: 'an iron bore of 35 °C read as 74.020 mm by a steel instrument of 20 °C',
-			gives: () =>
-				at20Mm(
-					74.02,
-					{ expansionPerK: 10.8e-6, temperatureC: 35 },
-					{ expansionPerK: 11.5e-6, temperatureC: 20 }
-				),
-			wanted: 74.008,
-			within: 0.0005
-		}
-	}
+	...temperatureFormulas,
+	...faceFormulas,
+	...valveFormulas
 ];

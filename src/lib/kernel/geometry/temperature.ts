@@ -3,6 +3,7 @@ import { cannot, type Outcome } from '../outcome';
 
 /** Linear expansion a kelvin, such as 11.5e-6 for steel, and degrees away from 20 °C. */
 export type Growth = { expansionPerK: number; riseK: number };
+export type Body = { expansionPerK: number; temperatureC: number };
 
 /** The temperature at which sizes are printed. Source: ISO 1:2022. */
 export const referenceC = 20;
@@ -19,6 +20,8 @@ export const referenceC = 20;
  */
 export function growthApartMm(lengthMm: number, outer: Growth, inner: Growth): Outcome<number> {
 	if (!(lengthMm > 0)) return cannot('a size is a number above zero');
+	const fault = growthFault(outer) ?? growthFault(inner);
+	if (fault) return cannot(fault);
 	return computedNumber(
 		lengthMm * (outer.expansionPerK * outer.riseK - inner.expansionPerK * inner.riseK)
 	);
@@ -40,8 +43,32 @@ export function at20Mm(readMm: number, part: Body, instrument: Body): Outcome<nu
 	return apart.ok ? computedNumber(readMm + apart.value) : apart;
 }
 
-export type Body = { expansionPerK: number; temperatureC: number };
+/**
+ * The other way: what an instrument of one temperature reads on a part of another whose size at
+ * 20 °C is known, such as a printed limit on a warm day.
+ *
+ * Formula: L = L20 / (1 + αs · (Ts − 20) − αp · (Tp − 20)).
+ * @param sizeAt20Mm mm @param part, instrument expansion 1/K and temperature °C
+ * @returns mm
+ * Source: ISO 1:2022 (20 °C); first order in the expansions.
+ * @example readingOfMm(74.008, { expansionPerK: 10.8e-6, temperatureC: 35 },
+ *   { expansionPerK: 11.5e-6, temperatureC: 20 }) // 74.020
+ */
+export function readingOfMm(sizeAt20Mm: number, part: Body, instrument: Body): Outcome<number> {
+	const perMm = growthApartMm(1, growthOf(instrument), growthOf(part));
+	if (!perMm.ok) return perMm;
+	if (!(sizeAt20Mm > 0)) return cannot('a size is a number above zero');
+	return computedNumber(sizeAt20Mm / (1 + perMm.value));
+}
 
-function growthOf({ expansionPerK, temperatureC }: Body): Growth {
+export function growthOf({ expansionPerK, temperatureC }: Body): Growth {
 	return { expansionPerK, riseK: temperatureC - referenceC };
+}
+
+/** Why no sum can be made of this, if none can: beyond these a figure is a slip. */
+export function growthFault({ expansionPerK, riseK }: Growth): string | undefined {
+	if (!(expansionPerK >= 0 && expansionPerK <= 1e-3))
+		return 'an expansion is a small number a kelvin, such as 0.0000115 for steel';
+	if (!(Math.abs(riseK) <= 1000)) return 'a temperature lies within 1000 °C of 20 °C';
+	return undefined;
 }
