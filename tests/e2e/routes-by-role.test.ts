@@ -35,6 +35,8 @@ const table: Record<string, Line> = {
 	'/(public)': { read: 'anyone' },
 	'/(public)/check': { read: 'anyone' },
 	'/(public)/check/[code]': { read: 'anyone' },
+	'/(public)/crib': { read: 'anyone' },
+	'/(public)/crib/[calculator]': { read: 'anyone' },
 	'/(public)/prospectus': { read: 'anyone' },
 	'/(auth)/account': {
 		read: 'signed-in',
@@ -254,6 +256,7 @@ async function namesFor(dataDir: string): Promise<Names> {
 			"SELECT c.id FROM cohorts c JOIN schools s ON s.id = c.schoolId WHERE s.slug = 'averholm'"
 		),
 		sheet: 'av3-1150',
+		calculator: 'oil-clearance',
 		code: 'RL-0000-0000-0000',
 		token: 'a-token-that-was-never-given-out'
 	};

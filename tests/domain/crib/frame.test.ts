@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { cellsOf, pastedCells, textOf } from '$lib/domain/crib/cells';
+import { cellsOf, filledCells, pastedCells, textOf } from '$lib/domain/crib/cells';
 import { drawers } from '$lib/domain/crib/calculator';
 import { fromLink, toLink } from '$lib/domain/crib/link';
 import { exampleEntries, initialEntries, readEntries } from '$lib/domain/crib/read-entries';
@@ -127,6 +127,18 @@ describe('cells', () => {
 				}
 			)
 		);
+	});
+	it('are read without the spare rows and columns, and keep a gap between readings', () => {
+		const cells = [
+			['1', '', ''],
+			['', '2', ''],
+			['', ' ', '']
+		];
+		expect(filledCells(cells)).toEqual([
+			['1', ''],
+			['', '2']
+		]);
+		expect(filledCells([['', '']])).toEqual([]);
 	});
 	it.each([
 		[

@@ -6,6 +6,16 @@ export function cellsOf(text: string): string[][] {
 	return text === '' ? [] : text.split('*').map((row) => row.split('_'));
 }
 
+/** Without the rows and columns after the last one in which something stands: spare room is no reading. */
+export function filledCells(cells: readonly (readonly string[])[]): string[][] {
+	const isFilled = (text: string | undefined) => (text ?? '').trim() !== '';
+	const rows = cells.findLastIndex((row) => row.some(isFilled)) + 1;
+	const columns = Math.max(0, ...cells.map((row) => row.findLastIndex(isFilled) + 1));
+	return cells
+		.slice(0, rows)
+		.map((row) => Array.from({ length: columns }, (_, at) => row[at] ?? ''));
+}
+
 export function textOf(cells: readonly (readonly string[])[]): string {
 	const clean = (one: string) => one.replace(/[_*]/g, ' ').trim();
 	return cells.map((row) => row.map(clean).join('_')).join('*');

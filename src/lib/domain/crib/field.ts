@@ -1,7 +1,7 @@
 import { convert, type DimensionName, type UnitOf } from '$lib/kernel/quantity/units';
 import { parseQuantity } from '$lib/kernel/quantity/parse-quantity';
 import { cannot, computed, type Outcome } from '$lib/kernel/outcome';
-import { cellsOf } from './cells';
+import { cellsOf, filledCells } from './cells';
 
 export type System = 'metric' | 'inch';
 /** What stands in a field: the text as typed, and the unit chosen beside it. */
@@ -162,7 +162,7 @@ export function grid(given: Given<GridFace>): Field<(number | null)[][] | undefi
 		...given,
 		kind: 'grid',
 		read: (entry, system) =>
-			all(cellsOf(entry.text), (cells, row) =>
+			all(filledCells(cellsOf(entry.text)), (cells, row) =>
 				all(cells, (text, column) => {
 					const value = cell(given, { ...entry, text }, system);
 					return value.ok
