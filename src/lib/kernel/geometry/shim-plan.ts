@@ -76,7 +76,8 @@ export function shimPlan(
 			from: at === row ? 'stays' : giver ? 'valve' : at < hand.length ? 'box' : 'bought',
 			...(giver ? { giver } : {}),
 			lashMm,
-			offMm: tidy(lashMm - middleMm(valve))
+			// Nothing off is 0, not the −0 that rounding may leave.
+			offMm: tidy(lashMm - middleMm(valve)) + 0
 		};
 	});
 	const spareMm = hand.filter((_, at) => !taken.includes(at)).toSorted((a, b) => a - b);

@@ -78,7 +78,7 @@ export function shimCount({ fromMm, toMm, stepMm }: ShimSizes): Outcome<number> 
  * @example screwTurnDeg(0.05, 1) // 18
  */
 export function screwTurnDeg(changeMm: number, pitchMm: number): Outcome<number> {
-	if (!(changeMm >= 0) || !(pitchMm > 0))
+	if (!(changeMm >= 0) || !(pitchMm > 0 && pitchMm <= 100))
 		return cannot('a change of lash is zero or more, a pitch above zero');
 	return computedNumber((360 * changeMm) / pitchMm);
 }
