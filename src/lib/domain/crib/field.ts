@@ -1,5 +1,6 @@
 import { convert, type DimensionName, type UnitOf } from '$lib/kernel/quantity/units';
 import { parseQuantity } from '$lib/kernel/quantity/parse-quantity';
+import { readNumber } from '$lib/kernel/quantity/read-number';
 import { cannot, computed, type Outcome } from '$lib/kernel/outcome';
 import { cellsOf, filledCells } from './cells';
 
@@ -236,10 +237,8 @@ function inMetric({ dimension, unit }: Measured, entry: Entry, system: System): 
 }
 
 function plainNumber(text: string): Outcome<number> {
-	// A figure without a unit is read by the same rule as one with; millimetres stand for "none".
-	const read = parseQuantity(text, 'length', 'mm');
-	if (!read.ok) return read;
-	return /[a-zµ"″°]/i.test(text) ? cannot('a figure without a unit') : computed(read.value.value);
+	// A bare figure has no thousands that a comma could part: it is a decimal mark, as in millimetres.
+	return readNumber(text, 'mm');
 }
 
 function inRange({ least, most }: Range, value: number, unit: string): Outcome<number> {

@@ -13,9 +13,9 @@ const others: Record<string, Other> = {
 	kN: { dimension: 'force', unit: 'lbf', moreDecimals: -2 },
 	bar: { dimension: 'pressure', unit: 'psi', moreDecimals: -1 },
 	MPa: { dimension: 'pressure', unit: 'psi', moreDecimals: -2 },
-	'cm³': { dimension: 'volume' as DimensionName, unit: 'in³', moreDecimals: 1 },
-	'°C': { dimension: 'temperature' as DimensionName, unit: '°F', moreDecimals: 0 },
-	kW: { dimension: 'power' as DimensionName, unit: 'hp', moreDecimals: 0 }
+	'cm³': { dimension: 'volume', unit: 'in³', moreDecimals: 1 },
+	'°C': { dimension: 'temperature', unit: '°F', moreDecimals: 0 },
+	kW: { dimension: 'power', unit: 'hp', moreDecimals: 0 }
 };
 
 export type Figure = { figure: string; unit: string };

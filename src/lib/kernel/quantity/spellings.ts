@@ -8,11 +8,16 @@ const pound = '(lbf?s?|pounds?)';
 const foot = '(ft|foot|feet)';
 const inch = '(in|inch|inches)';
 const either = (a: string, b: string) => new RegExp(`^(${a}${joint}${b}|${b}${joint}${a})$`, 'i');
+const celsius = /^(°\s*c|deg\.?\s*c|c|celsius)$/i;
+const fahrenheit = /^(°\s*f|deg\.?\s*f|f|fahrenheit)$/i;
+const kelvin = /^(k|kelvins?)$/i;
 
 /** How people write the units that we know, by dimension. */
 export const spellings: { readonly [D in DimensionName]: readonly Spelling<D>[] } = {
 	length: [
 		[/^(mm|millimet(er|re)s?)$/i, 'mm'],
+		[/^(cm|centimet(er|re)s?)$/i, 'cm'],
+		[/^(m|met(er|re)s?)$/i, 'm'],
 		[/^(µm|μm|um|microns?|micromet(er|re)s?)$/i, 'µm'],
 		[/^(in\.?|inch|inches|"|″)$/i, 'in'],
 		[/^(thou|thous|mil|mils)$/i, 'thou']
@@ -21,6 +26,7 @@ export const spellings: { readonly [D in DimensionName]: readonly Spelling<D>[] 
 		[new RegExp(`^(n|newton)${joint}(m|met(er|re)s?)$`, 'i'), 'N·m'],
 		[either(pound, foot), 'lbf·ft'],
 		[either(pound, inch), 'lbf·in'],
+		[either('kgf?', 'cm'), 'kgf·cm'],
 		[either('kgf?', 'm'), 'kgf·m']
 	],
 	force: [
@@ -33,6 +39,40 @@ export const spellings: { readonly [D in DimensionName]: readonly Spelling<D>[] 
 		[/^mpa$/i, 'MPa'],
 		[/^kpa$/i, 'kPa'],
 		[/^bars?$/i, 'bar'],
-		[/^psi$/i, 'psi']
+		[/^(psi|lbf?\/in(²|2))$/i, 'psi'],
+		[/^kgf?\/cm(²|2)$/i, 'kgf/cm²'],
+		[/^in\.?\s*hg$/i, 'inHg'],
+		[/^(mm\s*hg|torr)$/i, 'mmHg']
+	],
+	volume: [
+		[/^(cm(³|3)|cc|ccm|ml|cubic centimet(er|re)s?)$/i, 'cm³'],
+		[/^mm(³|3)$/i, 'mm³'],
+		[/^(l|lit(er|re)s?)$/i, 'L'],
+		[/^m(³|3)$/i, 'm³'],
+		[/^(in(³|3)|cu\.?\s*in\.?|cid|cubic inch(es)?)$/i, 'in³'],
+		[/^(ft(³|3)|cu\.?\s*ft\.?|cubic feet)$/i, 'ft³'],
+		[/^us\s*(qt|quarts?)$/i, 'US qt'],
+		[/^us\s*(gal|gallons?)$/i, 'US gal']
+	],
+	angle: [
+		[/^(°|deg|degrees?)$/i, '°'],
+		[/^(rad|radians?)$/i, 'rad'],
+		[/^(turns?|rev|revolutions?)$/i, 'turn']
+	],
+	temperature: [
+		[celsius, '°C'],
+		[fahrenheit, '°F'],
+		[kelvin, 'K']
+	],
+	temperatureDifference: [
+		[kelvin, 'K'],
+		[celsius, '°C'],
+		[fahrenheit, '°F']
+	],
+	power: [
+		[/^kw$/i, 'kW'],
+		[/^w(atts?)?$/i, 'W'],
+		[/^(hp|bhp|horsepower)$/i, 'hp'],
+		[/^(ps|metric (hp|horsepower))$/i, 'PS']
 	]
 };

@@ -5,7 +5,7 @@ import { seeded } from '$lib/kernel/random/random';
 import { withUnit } from '../figure-words';
 import { fillWords, keysIn } from '../fill-words';
 import type { Kind } from '../kind';
-import { readNumber } from '../read-number';
+import { readNumber } from '$lib/kernel/quantity/read-number';
 import { sumNames, sums } from '../sums/registry';
 import type { Expected, Given } from '../sums/sum';
 import { wordsSchema } from '../words';
@@ -117,9 +117,11 @@ export const numberWithUnit: Kind<NumberWithUnitBody, Drawn, NumberFace, NumberR
 	}),
 
 	score(body, { expected }, response) {
-		const value = readNumber(response.value);
+		const read = readNumber(response.value, response.unit);
 		const wrong = (explain: string) => ({ points: 0, right: false, explain });
-		if (value === undefined) return wrong(`“${response.value}” cannot be read as a number.`);
+		if (!read.ok)
+			return wrong(`“${response.value}” cannot be read as a number: ${read.because}.`);
+		const value = read.value;
 		const margin = allowed(body, expected.value) + 1e-9;
 		if (!unitsFor(expected.unit).includes(response.unit))
 			return wrong(`“${response.unit}” is no unit for this. ${expected.unit} was wanted.`);
