@@ -10,6 +10,7 @@ export default defineConfig({
 	test: {
 		include: ['tests/**/*.test.ts'],
 		exclude: ['tests/e2e/**'],
+		benchmark: { include: ['tests/bench/**/*.bench.ts'] },
 		setupFiles: ['tests/support/setup.ts'],
 		environment: 'node',
 		pool: 'forks',
