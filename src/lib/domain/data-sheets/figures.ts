@@ -1,15 +1,8 @@
 import { cannot, computed } from '$lib/kernel/outcome';
 import type { SheetFigures } from '../questions/sheet-figures';
-import type { DataSheet, Dimension } from './schema';
+import type { DataSheet } from './schema';
 import { dimensionOf, fastenerOf, patternOf } from './value-of';
-
-const unitWords: Record<Dimension['unit'], string> = {
-	mm: 'mm',
-	cm3: 'cm³',
-	bar: 'bar',
-	degC: '°C',
-	ratio: ''
-};
+import { unitWords } from './unit-words';
 
 /** One revision of a data sheet as questions ask of it. */
 export function figuresOf(sheet: DataSheet): SheetFigures {

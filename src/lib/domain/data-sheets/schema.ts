@@ -1,107 +1,108 @@
 import { z } from 'zod';
+import { dimensionSchema, fitSchema, oversizeSchema, shimRangeSchema } from './schema/dimension';
+import { fastenerSchema, patternSchema } from './schema/fastener';
+import { fluidSchema, layoutSchema, portSchema, weakPointSchema } from './schema/ways';
+import { familyKey, words } from './schema/words';
 
-/** `crankpin.oilClearance`: a part family, then what is meant of it. */
-export const sheetKey = z
-	.string()
-	.regex(/^[a-z][A-Za-z0-9]*(\.[a-z][A-Za-z0-9]*)+$/, 'a key such as crankpin.oilClearance');
-const words = z.string().trim().min(1).max(200);
-const mm = z.number();
+export { sheetKey } from './schema/words';
 
-const build = z
-	.strictObject({ least: mm, most: mm })
-	.refine((one) => one.most >= one.least, 'the least limit lies above the most');
-
-/** One dimension with its limits to build and to run again. */
-const dimension = z
-	.strictObject({
-		key: sheetKey,
-		words,
-		unit: z.enum(['mm', 'cm3', 'bar', 'degC', 'ratio']).default('mm'),
-		/** The last place that is compared: 3 for a micrometer's hundredths with an estimate. */
-		decimals: z.number().int().min(0).max(4).default(3),
-		nominal: mm.optional(),
-		build: build.optional(),
-		/** Beyond this it does not run again as it is. */
-		runAgain: z.strictObject({ least: mm.optional(), most: mm.optional() }).optional(),
-		note: words.optional(),
-		source: words
-	})
-	.refine((one) => one.nominal !== undefined || one.build !== undefined, 'a value or limits');
-
-const stage = z.union([
-	z.strictObject({ torqueNm: z.number().positive() }),
-	z.strictObject({ angleDeg: z.number().positive().max(360) })
-]);
-
-const fastener = z.strictObject({
-	key: sheetKey,
-	words,
-	thread: z.strictObject({ diameterMm: z.number().positive(), pitchMm: z.number().positive() }),
-	propertyClass: z.enum(['8.8', '10.9', '12.9']),
-	lubrication: words,
-	/** Length between head and first loaded thread: with it the load after an angle can be told. */
-	gripMm: z.number().positive().optional(),
-	stages: z.array(stage).min(1),
-	/** "Use again", "new each time": what the maker says of fitting it twice. */
-	reuse: words,
-	yieldTightened: z.boolean().default(false),
-	source: words
-});
-
-const pattern = z
-	.strictObject({
-		key: sheetKey,
-		words,
-		fastener: sheetKey,
-		/** Seen from above, millimetres, origin at the pattern's middle. */
-		bolts: z
-			.array(z.strictObject({ id: z.string().min(1).max(4), xMm: z.number(), yMm: z.number() }))
-			.min(2),
-		/** The maker's printed tightening order, by bolt id. */
-		printedOrder: z.array(z.string()).optional()
-	})
-	.refine(
-		(one) =>
-			!one.printedOrder ||
-			[...one.printedOrder].sort().join() ===
-				one.bolts
-					.map((bolt) => bolt.id)
-					.sort()
-					.join(),
-		'the printed order names every bolt once'
-	);
+/** Fewer sourced values than this are no data sheet; more are not needed to begin with. */
+export const fewestDimensions = 6;
 
 export const dataSheetSchema = z
 	.strictObject({
-		code: z.string().regex(/^[A-Z0-9]+(-[A-Z0-9]+)*$/),
-		key: z.string().regex(/^[a-z0-9]+(-[a-z0-9]+)*$/),
+		code: z.string().regex(/^[A-Z0-9]+(-[A-Z0-9]+)*$/, 'Capitals, digits and hyphens.'),
+		key: z.string().regex(/^[a-z0-9]+(-[a-z0-9]+)*$/, 'Small letters, digits and hyphens.'),
 		title: words,
-		revision: z.string().regex(/^[A-Z]$/),
+		revision: z.string().regex(/^[A-Z]{1,2}$/),
 		issuedOn: z.iso.date(),
 		drawnBy: words,
-		partFamilies: z.array(z.strictObject({ key: z.string(), words, material: words.optional() })),
-		dimensions: z.array(dimension).min(6),
-		fasteners: z.array(fastener).default([]),
-		patterns: z.array(pattern).default([]),
-		fluids: z.array(z.strictObject({ words, amount: words, kind: words })).default([])
+		/** Read by anybody, without an account, and offered in the tool crib. */
+		public: z.boolean().default(false),
+		layout: layoutSchema.optional(),
+		partFamilies: z
+			.array(
+				z.strictObject({
+					key: familyKey,
+					words,
+					material: words.optional(),
+					/** Linear expansion of the family's main part, per kelvin. */
+					expansionPerK: z.number().positive().max(1e-4).optional()
+				})
+			)
+			.min(1),
+		dimensions: z
+			.array(dimensionSchema)
+			.min(fewestDimensions, `Six values make a usable sheet.`)
+			.max(400),
+		fits: z.array(fitSchema).default([]),
+		fasteners: z.array(fastenerSchema).max(100).default([]),
+		patterns: z.array(patternSchema).max(40).default([]),
+		oversizes: z.array(oversizeSchema).max(40).default([]),
+		shims: z.array(shimRangeSchema).max(10).default([]),
+		fluids: z.array(fluidSchema).max(20).default([]),
+		ports: z.array(portSchema).max(80).default([]),
+		weakPoints: z.array(weakPointSchema).max(40).default([])
 	})
 	.superRefine((sheet, context) => {
+		const keyed = keyedThings(sheet);
+		const fault = (message: string) => context.addIssue({ code: 'custom', message });
 		const seen = new Set<string>();
-		for (const { key } of [...sheet.dimensions, ...sheet.fasteners, ...sheet.patterns]) {
-			if (seen.has(key)) context.addIssue({ code: 'custom', message: `${key} stands twice` });
+		for (const { key } of keyed) {
+			if (seen.has(key)) fault(`${key} stands twice`);
 			seen.add(key);
 		}
 		const families = new Set(sheet.partFamilies.map((one) => one.key));
-		for (const { key } of [...sheet.dimensions, ...sheet.fasteners, ...sheet.patterns])
-			if (!families.has(key.split('.')[0] ?? ''))
-				context.addIssue({ code: 'custom', message: `${key}: no such part family` });
+		if (families.size < sheet.partFamilies.length) fault('a part family stands twice');
+		for (const { key } of keyed)
+			if (!families.has(key.split('.')[0] ?? '')) fault(`${key}: no such part family`);
+		for (const one of sheet.weakPoints)
+			if (!families.has(one.family)) fault(`${one.key}: no part family ${one.family}`);
 		const fasteners = new Set(sheet.fasteners.map((one) => one.key));
 		for (const one of sheet.patterns)
-			if (!fasteners.has(one.fastener))
-				context.addIssue({ code: 'custom', message: `${one.key}: no fastener ${one.fastener}` });
+			if (!fasteners.has(one.fastener)) fault(`${one.key}: no fastener ${one.fastener}`);
+		const dimensions = new Set(sheet.dimensions.map((one) => one.key));
+		for (const one of sheet.fits)
+			for (const key of [one.clearance, one.outer, one.inner])
+				if (!dimensions.has(key))
+					fault(`the fit of ${one.clearance} names ${key}, which is no dimension`);
+		for (const one of sheet.oversizes)
+			if (!dimensions.has(one.of)) fault(`${one.key}: no dimension ${one.of}`);
 	});
 
+type Keyed = { key: string };
+
+/** Everything in a sheet that has a key of its own, in the order in which a sheet prints it. */
+export function keyedThings(sheet: {
+	dimensions: readonly Keyed[];
+	fasteners: readonly Keyed[];
+	patterns: readonly Keyed[];
+	oversizes: readonly Keyed[];
+	shims: readonly Keyed[];
+	ports: readonly Keyed[];
+	weakPoints: readonly Keyed[];
+}): Keyed[] {
+	const { dimensions, fasteners, patterns, oversizes, shims, ports, weakPoints } = sheet;
+	return [
+		...dimensions,
+		...fasteners,
+		...patterns,
+		...oversizes,
+		...shims,
+		...ports,
+		...weakPoints
+	];
+}
+
 export type DataSheet = z.infer<typeof dataSheetSchema>;
+/** A sheet as it is written: what has a default may be left out. */
+export type DataSheetInput = z.input<typeof dataSheetSchema>;
 export type Dimension = DataSheet['dimensions'][number];
+export type Fit = DataSheet['fits'][number];
 export type Fastener = DataSheet['fasteners'][number];
 export type Pattern = DataSheet['patterns'][number];
+export type Oversize = DataSheet['oversizes'][number];
+export type ShimRange = DataSheet['shims'][number];
+export type Port = DataSheet['ports'][number];
+export type WeakPoint = DataSheet['weakPoints'][number];
+export type Layout = NonNullable<DataSheet['layout']>;

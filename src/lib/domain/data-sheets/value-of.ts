@@ -1,4 +1,4 @@
-import type { DataSheet, Dimension, Fastener, Pattern } from './schema';
+import { keyedThings, type DataSheet, type Dimension, type Fastener, type Pattern } from './schema';
 
 /** A dimension by its key, such as `crankpin.oilClearance`. */
 export function dimensionOf(sheet: DataSheet, key: string): Dimension | undefined {
@@ -15,9 +15,7 @@ export function patternOf(sheet: DataSheet, key: string): Pattern | undefined {
 
 /** Every key that a lesson, question or job sheet may name. */
 export function keysOf(sheet: DataSheet): Set<string> {
-	return new Set(
-		[...sheet.dimensions, ...sheet.fasteners, ...sheet.patterns].map((one) => one.key)
-	);
+	return new Set(keyedThings(sheet).map((one) => one.key));
 }
 
 /** The limits that answer a question: to build anew, or to run again as it is. */

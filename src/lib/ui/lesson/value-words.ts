@@ -1,25 +1,19 @@
 import type { Dimension, Fastener } from '$lib/domain/data-sheets/schema';
+import { figureWords, stageWords } from '$lib/domain/data-sheets/unit-words';
 
-const units: Record<Dimension['unit'], string> = {
-	mm: ' mm',
-	cm3: ' cm³',
-	bar: ' bar',
-	degC: ' °C',
-	ratio: ''
-};
 type Cell = { label: string; value: string };
 
 /** "0.020–0.048 mm" */
 export function dimensionWords(dimension: Dimension): string {
-	const { build, nominal, decimals, unit } = dimension;
-	if (build)
-		return `${build.least.toFixed(decimals)}–${build.most.toFixed(decimals)}${units[unit]}`;
-	return `${(nominal ?? 0).toFixed(decimals)}${units[unit]}`;
+	const { build, nominal, decimals } = dimension;
+	return build
+		? `${build.least.toFixed(decimals)}–${figureWords(build.most, dimension)}`
+		: figureWords(nominal ?? 0, dimension);
 }
 
 export function dimensionCells(dimension: Dimension): Cell[] {
-	const { build, nominal, runAgain, decimals, unit } = dimension;
-	const fixed = (value: number) => `${value.toFixed(decimals)}${units[unit]}`;
+	const { build, nominal, runAgain } = dimension;
+	const fixed = (value: number) => figureWords(value, dimension);
 	const cells: Cell[] = [];
 	if (nominal !== undefined) cells.push({ label: 'nominal', value: fixed(nominal) });
 	if (build) cells.push({ label: 'to build', value: dimensionWords(dimension) });
@@ -30,18 +24,11 @@ export function dimensionCells(dimension: Dimension): Cell[] {
 	return cells;
 }
 
-/** "20 N·m, then 90°" */
-export function stageWords({ stages }: Pick<Fastener, 'stages'>): string {
-	return stages
-		.map((stage) => ('torqueNm' in stage ? `${stage.torqueNm} N·m` : `${stage.angleDeg}°`))
-		.join(', then ');
-}
-
 export function fastenerCells(fastener: Fastener): Cell[] {
 	const { thread, propertyClass, lubrication, reuse } = fastener;
 	return [
 		{ label: 'thread', value: `M${thread.diameterMm} × ${thread.pitchMm}, ${propertyClass}` },
-		{ label: 'tighten', value: stageWords(fastener) },
+		{ label: 'tighten', value: stageWords(fastener.stages) },
 		{ label: 'lubrication', value: lubrication },
 		{ label: 'fitted again', value: reuse }
 	];
