@@ -8,7 +8,9 @@ import {
 	type FaceGrid
 } from '$lib/kernel/geometry/flatness';
 import { abovePlaneMm, minimumZone, type FacePoint } from '$lib/kernel/geometry/minimum-zone';
+import { heightsUnderEdge, largestGapMm } from '$lib/kernel/geometry/straight-edge';
 import { straightness } from '$lib/kernel/geometry/straightness';
+import { ofWeightedReadingsMm } from '$lib/kernel/geometry/weighted-readings';
 import type { Outcome } from '$lib/kernel/outcome';
 import { expectWithin, referenceOf } from '../../support/reference';
 
@@ -154,8 +156,21 @@ describe('straightness of a line', () => {
 	it('is the gap under a straight edge that rests on both ends', () => {
 		expect(value(straightness({ atMm: [0, 60, 100], heightMm: [0, -0.05, 0] }))).toEqual({
 			widthMm: 0.05,
-			held: [0, 1, 2]
+			held: [0, 1, 2],
+			weights: [0.4, -1, 0.6]
 		});
+	});
+	it('is the sum of its three readings, each with its weight', () => {
+		fc.assert(
+			fc.property(profile, (line) => {
+				const { widthMm, held, weights } = value(straightness(line));
+				const sum = held.reduce(
+					(total, at, one) => total + (weights[one] ?? NaN) * (line.heightMm[at] ?? NaN),
+					0
+				);
+				expect(sum).toBeCloseTo(widthMm, 5);
+			})
+		);
 	});
 	it('does not change with the way that the straight edge rests', () => {
 		const slope = fc.double({ min: -0.01, max: 0.01, noNaN: true });
@@ -252,6 +267,52 @@ describe('lines of a face', () => {
 		expect(faceLines({ ...face, alongMm: [0, 50, 40, 150] }, 'both').ok).toBe(false);
 		expect(worstLine([])).toEqual({ ok: false, because: 'no line holds three readings' });
 		expect(worstLine(value(faceLines(face, 'both')), 30).ok).toBe(false);
+	});
+});
+
+describe('feeler gaps', () => {
+	it('are heights below the straight edge', () => {
+		const gaps = [
+			[0, 0.04, null, 0],
+			[0.02, 0, 0, 0.05]
+		];
+		expect(value(heightsUnderEdge(gaps))).toEqual([
+			[0, -0.04, null, 0],
+			[-0.02, 0, 0, -0.05]
+		]);
+		expect(value(largestGapMm(gaps))).toBe(0.05);
+	});
+	it('cannot be below zero, nor be none at all', () => {
+		for (const odd of [-0.01, Number.NaN, Infinity]) {
+			expect(heightsUnderEdge([[0, odd]]).ok).toBe(false);
+			expect(largestGapMm([[0, odd]]).ok).toBe(false);
+		}
+		expect(largestGapMm([[null]]).ok).toBe(false);
+	});
+	it('under an edge that rests on both ends are what the line departs from straight', () => {
+		const gap = fc.integer({ min: 0, max: 60 }).map((one) => one / 1000);
+		fc.assert(
+			fc.property(gap, gap, (a, b) => {
+				const line = { atMm: [0, 40, 80, 120], heightMm: [0, -a, -b, 0] };
+				expect(value(straightness(line)).widthMm).toBeGreaterThanOrEqual(
+					value(largestGapMm([[0, a, b, 0]])) - 1e-6
+				);
+			})
+		);
+	});
+});
+
+describe('the uncertainty of readings taken with weights', () => {
+	it('of a difference of two is √2 times that of one, and grows with it', () => {
+		const width = fc.integer({ min: 0, max: 50 }).map((one) => one / 1000);
+		fc.assert(
+			fc.property(width, (expanded) => {
+				expect(value(ofWeightedReadingsMm([1, -1], expanded))).toBeCloseTo(Math.SQRT2 * expanded);
+				expect(value(ofWeightedReadingsMm([1], expanded))).toBe(expanded);
+			})
+		);
+		for (const odd of [-0.01, Number.NaN, Infinity])
+			expect(ofWeightedReadingsMm([1, -1], odd).ok).toBe(false);
 	});
 });
 

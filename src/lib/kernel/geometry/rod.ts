@@ -28,6 +28,11 @@ export function outOfLinePer100Mm(small: MandrelReadings, big?: MandrelReadings)
 	return computedNumber(tidy(tilt(small) - (big ? tilt(big) : 0)));
 }
 
+/** What each reading has in the result of `outOfLinePer100Mm`, far and near of each mandrel. */
+export function outOfLineWeights(small: MandrelReadings, big?: MandrelReadings): number[] {
+	return (big ? [small, big] : [small]).flatMap(({ apartMm }) => [100 / apartMm, -100 / apartMm]);
+}
+
 /**
  * Length of a rod from centre to centre, from the distance over both mandrels: a bent rod is short.
  *

@@ -8,6 +8,9 @@ export type AtAngle = { angleDeg: number; readMm: number };
 export type AroundTheTurn = {
 	runoutMm: number;
 	eccentricityMm: number;
+	/** The two parts of the eccentricity, towards 0° and towards 90°. */
+	cosMm: number;
+	sinMm: number;
 	/** The angle at which the dial stands highest by eccentricity alone, 0 up to 360. */
 	highAtDeg: number;
 	/** What eccentricity leaves unexplained: largest less smallest of the rest. */
@@ -91,6 +94,8 @@ export function aroundTheTurn(readings: readonly AtAngle[]): Outcome<AroundTheTu
 	return computed({
 		runoutMm: tir.value,
 		eccentricityMm: tidy(Math.hypot(a, b)),
+		cosMm: tidy(a),
+		sinMm: tidy(b),
 		highAtDeg,
 		outOfRoundMm: tidy(Math.max(...restMm) - Math.min(...restMm)),
 		meanMm: tidy(meanMm),

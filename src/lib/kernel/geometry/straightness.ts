@@ -8,6 +8,8 @@ export type Straightness = {
 	widthMm: number;
 	/** The three readings that hold it: the middle one lies `widthMm` off the line of the others. */
 	held: readonly [number, number, number];
+	/** What each of the three has in the width: the sum of weight times height. */
+	weights: readonly [number, number, number];
 };
 
 const largestMm = 1e5;
@@ -44,9 +46,16 @@ export function straightness(
 			if (length > withinMm + 1e-9) break;
 			for (let middle = first + 1; middle < last; middle++) {
 				const [a = 0, b = 0, c = 0] = [heightMm[first], heightMm[middle], heightMm[last]];
-				const line = a + ((c - a) * ((atMm[middle] ?? 0) - from)) / length;
-				const widthMm = tidy(Math.abs(b - line));
-				if (!best || widthMm > best.widthMm) best = { widthMm, held: [first, middle, last] };
+				const part = ((atMm[middle] ?? 0) - from) / length;
+				const off = b - (a + (c - a) * part);
+				const widthMm = tidy(Math.abs(off));
+				const side = off < 0 ? -1 : 1;
+				if (!best || widthMm > best.widthMm)
+					best = {
+						widthMm,
+						held: [first, middle, last],
+						weights: [side * (part - 1), side, -side * part]
+					};
 			}
 		}
 	if (best) return computed(best);

@@ -9,6 +9,19 @@ export type Body = { expansionPerK: number; temperatureC: number };
 export const referenceC = 20;
 
 /**
+ * How much a length has grown since 20 °C.
+ *
+ * Formula: ΔL = L · α · ΔT.
+ * @param lengthMm L, mm, above zero @param growth expansion 1/K, rise from 20 °C in K
+ * @returns mm; below zero where it is colder
+ * Source: definition of linear expansion, first order.
+ * @example growthMm(74, { expansionPerK: 23e-6, riseK: 15 }) // 0.0255
+ */
+export function growthMm(lengthMm: number, growth: Growth): Outcome<number> {
+	return growthApartMm(lengthMm, growth, { expansionPerK: 0, riseK: 0 });
+}
+
+/**
  * How much more the outer of two bodies of one size has grown than the inner.
  *
  * Formula: Δ = L · (αo · ΔTo − αi · ΔTi).

@@ -3,7 +3,9 @@ import { allowedOverMm } from '../flatness';
 import { minimumZone } from '../minimum-zone';
 import { outOfLinePer100Mm, rodLengthMm } from '../rod';
 import { aroundTheTurn, eccentricityMm, runoutMm } from '../runout';
+import { largestGapMm } from '../straight-edge';
 import { straightness } from '../straightness';
+import { ofWeightedReadingsMm } from '../weighted-readings';
 
 /** Flat faces, rods and what turns. */
 export const faceFormulas: readonly Formula[] = [
@@ -41,6 +43,30 @@ export const faceFormulas: readonly Formula[] = [
 			},
 			wanted: 0.04,
 			within: 1e-6
+		}
+	},
+	{
+		id: 'geometry/largest-gap',
+		works: largestGapMm,
+		formula: 'largest gap = the thickest feeler that enters anywhere under the edge',
+		source: 'definition; common practice',
+		example: {
+			says: 'gaps of 0, 0.04 and 0.02 mm',
+			gives: () => largestGapMm([[0, 0.04, 0.02]]),
+			wanted: 0.04,
+			within: 1e-9
+		}
+	},
+	{
+		id: 'geometry/of-weighted-readings',
+		works: ofWeightedReadingsMm,
+		formula: 'U = U1 · √(Σ weight²)',
+		source: 'JCGM 100:2008, 5.1.2, readings of one uncertainty that do not depend on each other',
+		example: {
+			says: 'four readings of weight one half, each ± 0.004 mm',
+			gives: () => ofWeightedReadingsMm([0.5, 0.5, -0.5, -0.5], 0.004),
+			wanted: 0.004,
+			within: 1e-9
 		}
 	},
 	{

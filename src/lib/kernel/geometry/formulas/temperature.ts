@@ -1,6 +1,6 @@
 import type { Formula } from '../../formula';
 import { perFahrenheit } from '../expansion';
-import { at20Mm, growthApartMm, readingOfMm } from '../temperature';
+import { at20Mm, growthApartMm, growthMm, readingOfMm } from '../temperature';
 import { gapClosedMm, riseToGrowK, warmClearanceMm } from '../thermal-growth';
 
 const firstOrder = 'definition of linear expansion, first order';
@@ -12,6 +12,18 @@ const piston = { expansionPerK: 20e-6, riseK: 60 };
 
 /** What warmth does to sizes and to what measures them. */
 export const temperatureFormulas: readonly Formula[] = [
+	{
+		id: 'geometry/growth',
+		works: growthMm,
+		formula: 'ΔL = L · α · ΔT',
+		source: firstOrder,
+		example: {
+			says: '74 mm of aluminium alloy, 15 K warmer',
+			gives: () => growthMm(74, { expansionPerK: 23e-6, riseK: 15 }),
+			wanted: 0.0255,
+			within: 0.00005
+		}
+	},
 	{
 		id: 'geometry/growth-apart',
 		works: growthApartMm,
