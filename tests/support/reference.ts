@@ -20,6 +20,16 @@ export function referenceOf<T>(file: string): [string, Reference<T>][] {
 	return entries.map((one) => [`${one.id} ${one.quantity} (${one.source})`, one]);
 }
 
+/** Entries whose inputs stand as they were published, by the letters of their formula. */
+export type Worked = Reference<{ inputs: Record<string, number> }>;
+
+/** An input of a published entry; a missing one is a slip of the test's own. */
+export function given({ id, inputs }: Pick<Worked, 'id' | 'inputs'>, name: string): number {
+	const value = inputs[name];
+	if (value === undefined) throw new Error(`${id} gives no ${name}`);
+	return value;
+}
+
 /** Within what the published value is good for; "exact" leaves room for binary dust alone. */
 export function expectWithin(value: number, { expected, tolerance }: Reference<unknown>): void {
 	const { kind, value: width = 0 } = tolerance;

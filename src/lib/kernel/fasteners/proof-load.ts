@@ -1,10 +1,9 @@
 import { computedNumber } from '../computed-number';
-import type { Outcome } from '../outcome';
+import { cannot, computed, type Outcome } from '../outcome';
+import { classStrength, type PropertyClass, type Strength } from './strength';
 import { stressAreaMm2 } from './stress-area';
 
-export type PropertyClass = '4.6' | '5.8' | '8.8' | '10.9' | '12.9';
-
-const proofStresses = { '4.6': 225, '5.8': 380, '8.8': 580, '10.9': 830, '12.9': 970 } as const;
+export type { PropertyClass };
 
 /**
  * Stress under proof load.
@@ -15,7 +14,7 @@ const proofStresses = { '4.6': 225, '5.8': 380, '8.8': 580, '10.9': 830, '12.9':
  * @example proofStressMPa('10.9', 10) // 830
  */
 export function proofStressMPa(propertyClass: PropertyClass, diameterMm: number): number {
-	return propertyClass === '8.8' && diameterMm > 16 ? 600 : proofStresses[propertyClass];
+	return classStrength(propertyClass, diameterMm).proofMPa;
 }
 
 /**
@@ -32,9 +31,47 @@ export function proofLoadN(
 	pitchMm: number,
 	propertyClass: PropertyClass
 ): Outcome<number> {
+	const loads = boltLoads(diameterMm, pitchMm, propertyClass);
+	return loads.ok ? computed(loads.value.proofN) : loads;
+}
+
+export type Loads = { areaMm2: number; proofN: number; yieldN: number; tensileN: number };
+
+/**
+ * Proof, yield and least tensile load of a metric bolt.
+ *
+ * Formula: F = As · S, with As to three significant figures and S the proof stress, the yield or
+ * 0.2 % proof strength, or the tensile strength of the class.
+ * @param diameterMm nominal d, mm @param pitchMm pitch P, mm
+ * @returns area in mm², loads in N
+ * Source: ISO 898-1:2013, table 3 (stresses), tables 4 to 7 (loads).
+ * @example boltLoads(10, 1.5, '10.9') // proof 48 140 N, tensile 60 320 N
+ */
+export function boltLoads(
+	diameterMm: number,
+	pitchMm: number,
+	propertyClass: PropertyClass
+): Outcome<Loads> {
 	const area = stressAreaMm2(diameterMm, pitchMm);
 	if (!area.ok) return area;
-	return computedNumber(
-		Number(area.value.toPrecision(3)) * proofStressMPa(propertyClass, diameterMm)
-	);
+	return loadsOf(Number(area.value.toPrecision(3)), classStrength(propertyClass, diameterMm));
+}
+
+/**
+ * Loads that a stress area bears.
+ *
+ * @param areaMm2 mm², above zero @param strength stresses, N/mm²
+ * @returns N
+ * @example loadsOf(58, { proofMPa: 830, yieldMPa: 940, tensileMPa: 1040 }) // proof 48 140 N
+ */
+export function loadsOf(areaMm2: number, strength: Strength): Outcome<Loads> {
+	if (!(areaMm2 > 0)) return cannot('a stress area is above zero');
+	const tensile = computedNumber(areaMm2 * strength.tensileMPa);
+	if (!tensile.ok) return tensile;
+	return computed({
+		areaMm2,
+		proofN: areaMm2 * strength.proofMPa,
+		yieldN: areaMm2 * strength.yieldMPa,
+		tensileN: tensile.value
+	});
 }
