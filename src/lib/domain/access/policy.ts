@@ -42,6 +42,7 @@ export const policy: { readonly [A in Action]: Rule<A> } = {
 	'school:read': { who: ['student', ...staff] },
 
 	'prospectus:read': anyone,
+	'data-sheet:read-public': anyone,
 	'certificate:check': anyone,
 	'certificate:read-own': { who: ['student', 'verifier', 'admin'], only: own },
 	'certificate:withdraw': { who: ['verifier'], only: notMarked },
@@ -79,6 +80,8 @@ export const policy: { readonly [A in Action]: Rule<A> } = {
 	'bench-hours:enter': { who: ['instructor'], only: notOwn },
 	'register:read': { who: ['instructor', 'admin'] },
 	'publication:read': { who: staff },
+	'data-sheet:edit': { who: ['instructor'] },
+	'data-sheet:publish': { who: ['instructor'] },
 
 	'award:list': { who: ['verifier'] },
 	'award:decide': { who: ['verifier'], only: notMarked },

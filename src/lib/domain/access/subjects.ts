@@ -17,6 +17,7 @@ export type Subjects = {
 	'school:read': School;
 
 	'prospectus:read': object;
+	'data-sheet:read-public': object;
 	'certificate:check': object;
 	'certificate:read-own': Owned;
 	'certificate:withdraw': Marked;
@@ -46,6 +47,8 @@ export type Subjects = {
 	'bench-hours:enter': Owned;
 	'register:read': School;
 	'publication:read': School;
+	'data-sheet:edit': School;
+	'data-sheet:publish': School;
 
 	'award:list': School;
 	'award:decide': Marked;

@@ -6,13 +6,15 @@ import { schoolsAndAccounts } from './001-schools-and-accounts';
 import { coursesAndCohorts } from './002-courses-and-cohorts';
 import { progressAndQuizzes } from './003-progress-and-quizzes';
 import { jobSheetsAndAwards } from './004-job-sheets-and-awards';
+import { drafts } from './005-drafts';
 
 /** An explicit list, oldest first. A migration that has landed is never edited. */
 export const migrations = [
 	schoolsAndAccounts,
 	coursesAndCohorts,
 	progressAndQuizzes,
-	jobSheetsAndAwards
+	jobSheetsAndAwards,
+	drafts
 ];
 
 /** Brings a file up to the newest version, one transaction a migration. */

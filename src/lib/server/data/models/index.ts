@@ -2,6 +2,7 @@ import type { Table } from '../table';
 import * as accounts from './accounts';
 import * as certificates from './certificates';
 import * as cohorts from './cohorts';
+import * as drafts from './drafts';
 import * as jobSheets from './job-sheets';
 import * as progress from './progress';
 import * as publications from './publications';
@@ -17,12 +18,14 @@ export const tables: Table[] = [
 	quizzes,
 	jobSheets,
 	certificates,
+	drafts,
 	records
 ].flatMap((module) => Object.values(module) as Table[]);
 
 export * from './accounts';
 export * from './certificates';
 export * from './cohorts';
+export * from './drafts';
 export * from './job-sheets';
 export * from './progress';
 export * from './publications';
