@@ -4,10 +4,13 @@ import { cannot, computed, type Outcome } from '../outcome';
 export type Material = {
 	key: string;
 	words: string;
-	/** A kelvin. Alloys of one name differ by about a tenth. */
+	/** A kelvin. */
 	perK: number;
 	source: string;
 };
+
+/** How far alloys of one name lie apart from a table's value, as a part of it. */
+export const alloysDifferBy = 0.1;
 
 const firstTable = 'engineering table, coefficients of linear thermal expansion';
 const secondTable = 'engineering table, coefficient of linear thermal expansion, 1e-6 in/in °F';

@@ -1,0 +1,12 @@
+import { formatQuantity } from '$lib/kernel/quantity/format-quantity';
+
+/** A figure as it is put into a formula, with a true minus. */
+export function figure(value: number, decimals = 3): string {
+	return formatQuantity(value, '', 10 ** -decimals);
+}
+
+/** The same after a sign of its own: what lies below zero stands in brackets. */
+export function bracketed(value: number, decimals = 3): string {
+	const printed = figure(value, decimals);
+	return printed.startsWith('−') ? `(${printed})` : printed;
+}
