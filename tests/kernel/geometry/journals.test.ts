@@ -2,36 +2,11 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { leastMm, mostMm, outOfRoundMm, taperMm } from '$lib/kernel/geometry/diameter-grid';
 import { oilClearance } from '$lib/kernel/geometry/oil-clearance';
-import { expectWithin, referenceOf } from '../../support/reference';
 
-const inch = 25.4;
 const value = (outcome: { ok: true; value: number } | { ok: false; because: string }) => {
 	if (!outcome.ok) throw new Error(outcome.because);
 	return outcome.value;
 };
-
-describe('published readings', () => {
-	it.each(referenceOf<{ readingsIn: [number, number] }>('clearances.json'))('%s', (_, entry) => {
-		const [a, b] = entry.readingsIn.map((one) => one * inch) as [number, number];
-		const sums = {
-			'out-of-round': () => value(outOfRoundMm([[a, b]])),
-			taper: () => value(taperMm([[a], [b]])),
-			clearance: () => {
-				const found = oilClearance([[a]], [[b]]);
-				if (!found.ok) throw new Error(found.because);
-				return found.value.leastMm;
-			}
-		};
-		const kind = /taper/.test(entry.quantity)
-			? 'taper'
-			: /clearance/.test(entry.quantity)
-				? 'clearance'
-				: 'out-of-round';
-		// Results are rounded to the nanometre, which is 4e-8 in.
-		const room = Math.max(entry.tolerance.value ?? 0, 4e-8);
-		expectWithin(sums[kind]() / inch, { ...entry, tolerance: { kind: 'absolute', value: room } });
-	});
-});
 
 describe('a grid of diameters', () => {
 	const reading = fc.integer({ min: 39_900, max: 40_100 }).map((one) => one / 1000);
