@@ -1,7 +1,11 @@
+import type { BudgetDrawing } from './drawings/budget';
 import type { ClearanceDrawing } from './drawings/clearance';
+import type { ConformanceDrawing } from './drawings/conformance';
 import type { FaceDrawing } from './drawings/face';
+import type { GroupStudyDrawing } from './drawings/group-study';
 import type { RodDrawing } from './drawings/rod';
 import type { ShimsDrawing } from './drawings/shims';
+import type { ToolZonesDrawing } from './drawings/tool-zones';
 import type { TurnDrawing } from './drawings/turn';
 import type { WarmDrawing } from './drawings/warm';
 
@@ -10,4 +14,13 @@ import type { WarmDrawing } from './drawings/warm';
  * component in `ui/crib/drawings`; a kind without a component does not compile.
  */
 export type Drawing =
-	ClearanceDrawing | FaceDrawing | RodDrawing | ShimsDrawing | TurnDrawing | WarmDrawing;
+	| ClearanceDrawing
+	| FaceDrawing
+	| RodDrawing
+	| ShimsDrawing
+	| TurnDrawing
+	| WarmDrawing
+	| BudgetDrawing
+	| ConformanceDrawing
+	| GroupStudyDrawing
+	| ToolZonesDrawing;

@@ -1,10 +1,14 @@
 import { drawers, type AnyCalculator } from './calculator';
 import { flatness } from './calculators/flatness';
+import { groupStudy } from './calculators/group-study';
 import { oilClearance } from './calculators/oil-clearance';
+import { reading } from './calculators/reading';
 import { rod } from './calculators/rod';
+import { ruling } from './calculators/ruling';
 import { runout } from './calculators/runout';
 import { temperature } from './calculators/temperature';
 import { valveShims } from './calculators/valve-shims';
+import { whichTool } from './calculators/which-tool';
 
 /** One line a calculator. */
 export const calculators: readonly AnyCalculator[] = [
@@ -13,7 +17,11 @@ export const calculators: readonly AnyCalculator[] = [
 	rod,
 	valveShims,
 	runout,
-	temperature
+	temperature,
+	reading,
+	ruling,
+	whichTool,
+	groupStudy
 ];
 
 export function calculatorNamed(key: string): AnyCalculator | undefined {

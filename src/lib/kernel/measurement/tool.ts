@@ -1,3 +1,4 @@
+import { computedNumber } from '../computed-number';
 import { cannot, computed, type Outcome } from '../outcome';
 import { guardBandOf, type GuardBandRule } from './guard-band';
 import type { Limits } from './ruling';
@@ -60,6 +61,21 @@ export function judgeTool(expanded: number, asked: Asked): Outcome<ToolJudgement
 		undecided: limits.map((limit) => ({ from: limit - guardBand, to: limit + guardBand })),
 		share
 	});
+}
+
+/**
+ * The largest expanded uncertainty with which a tool still judges by these limits.
+ *
+ * Formula: U = (most − least) / (2 · ratio), for one limit room / ratio.
+ * @param asked limits, for a single one the room @param ratio wanted, above zero
+ * @returns in the limits' unit; "cannot" as judgeTool
+ * Source: ANSI/NCSL Z540.3-2006 (4:1), solved for U.
+ * @example expandedFor({ least: 39.984, most: 40 }) // 0.002
+ */
+export function expandedFor(asked: Asked, ratio = usualRatio): Outcome<number> {
+	const half = halfWidth(asked);
+	if (!half.ok) return half;
+	return ratio > 0 ? computedNumber(half.value / ratio) : cannot('a ratio is above zero');
 }
 
 function halfWidth({ least, most, room }: Asked): Outcome<number> {

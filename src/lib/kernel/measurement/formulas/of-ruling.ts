@@ -5,7 +5,8 @@ import { guardBandOf } from '../guard-band';
 import { knownAfter } from '../known-before';
 import { ruleReading } from '../ruling';
 import { guardBandForRisk, riskAtGuardBand } from '../specific-risk';
-import { judgeTool } from '../tool';
+import { inHandMm } from '../in-hand';
+import { expandedFor, judgeTool } from '../tool';
 import { from } from './from';
 
 export const rulingFormulas: readonly Formula[] = [
@@ -121,6 +122,30 @@ export const rulingFormulas: readonly Formula[] = [
 			gives: () => from(judgeTool(0.002, { least: 39.984, most: 40 }), ({ ratio }) => ratio),
 			wanted: 4,
 			within: 1e-9
+		}
+	},
+	{
+		id: 'measurement/expanded-for',
+		works: expandedFor,
+		formula: 'U = (most − least) / (2 · 4), for one limit room / 4',
+		source: 'ANSI/NCSL Z540.3-2006 (4:1), solved for U',
+		example: {
+			says: 'for 39.984 to 40.000 mm',
+			gives: () => expandedFor({ least: 39.984, most: 40 }),
+			wanted: 0.002,
+			within: 1e-9
+		}
+	},
+	{
+		id: 'measurement/in-hand',
+		works: inHandMm,
+		formula: 'U = 2 · √(s² / n + δ² / 12 + (U_cal / 2)²)',
+		source: 'JCGM 100:2008 (GUM), 4.2.3, F.2.2.1 and 6.2.1',
+		example: {
+			says: 'one reading by 0.001 mm, calibrated to 0.002, scatter 0.001',
+			gives: () => inHandMm({ leastCountMm: 0.001, calibrationMm: 0.002, scatterMm: 0.001 }, 1),
+			wanted: 0.00289,
+			within: 0.000005
 		}
 	}
 ];

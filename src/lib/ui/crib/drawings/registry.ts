@@ -1,9 +1,13 @@
 import type { Component } from 'svelte';
 import type { Drawing } from '$lib/domain/crib/drawing';
+import Budget from './Budget.svelte';
 import Clearance from './Clearance.svelte';
+import Conformance from './Conformance.svelte';
 import Face from './Face.svelte';
+import GroupStudy from './GroupStudy.svelte';
 import Rod from './Rod.svelte';
 import Shims from './Shims.svelte';
+import ToolZones from './ToolZones.svelte';
 import Turn from './Turn.svelte';
 import Warm from './Warm.svelte';
 
@@ -16,7 +20,11 @@ const components: Drawn = {
 	rod: Rod,
 	shims: Shims,
 	turn: Turn,
-	warm: Warm
+	warm: Warm,
+	budget: Budget,
+	conformance: Conformance,
+	'group-study': GroupStudy,
+	'tool-zones': ToolZones
 };
 
 export function drawingComponent(kind: Drawing['kind']): Component<{ drawing: Drawing }> {
