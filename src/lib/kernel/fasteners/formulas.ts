@@ -1,6 +1,7 @@
 import type { Formula } from '../formula';
 import { angleFormulas } from './formulas/angle';
 import { leverFormulas } from './formulas/levers';
+import { orderFormulas } from './formulas/orders';
 import { preloadFormulas } from './formulas/preload';
 import { threadFormulas } from './formulas/threads';
 
@@ -8,5 +9,6 @@ export const fastenerFormulas: readonly Formula[] = [
 	...threadFormulas,
 	...preloadFormulas,
 	...angleFormulas,
-	...leverFormulas
+	...leverFormulas,
+	...orderFormulas
 ];

@@ -1,4 +1,5 @@
 import type { Formula } from '../../formula';
+import { forgottenExtension, withDrag } from '../drag';
 import { effectiveLever, torqueAtFastener, wrenchSetting } from '../extension';
 
 const leverRule = 'US Army TM 1-1500-204-23-9, chapter 8, figure 8-16; FAA AC 43.13-1B, 7-40';
@@ -40,6 +41,30 @@ export const leverFormulas: readonly Formula[] = [
 			gives: () => torqueAtFastener({ torque: 50, lengthL: 400, extensionE: 60, angleDeg: 0 }),
 			wanted: 57.5,
 			within: 0.005
+		}
+	},
+	{
+		id: 'fasteners/with-drag',
+		works: withDrag,
+		formula: 'T = wanted + drag',
+		source: 'FAA AC 43.13-1B, 7-40',
+		example: {
+			says: '50 wanted, 8 of drag',
+			gives: () => withDrag(50, 8),
+			wanted: 58,
+			within: 1e-9
+		}
+	},
+	{
+		id: 'fasteners/forgotten-extension',
+		works: forgottenExtension,
+		formula: 'error = E · cos φ / L',
+		source: leverRule,
+		example: {
+			says: 'L 400 mm, E 60 mm straight on',
+			gives: () => forgottenExtension(400, 60, 0),
+			wanted: 0.15,
+			within: 1e-9
 		}
 	}
 ];

@@ -1,0 +1,57 @@
+import { computed, type Outcome } from '../../outcome';
+import type { Formula } from '../../formula';
+import { thirdsNm } from '../stage-sequence';
+import { orderFromMiddle, soundNext } from '../tightening-order';
+
+/** Eight bolts around a flange, named by their place on the turn. */
+const flange = Array.from({ length: 8 }, (_, at) => ({
+	id: String(at + 1),
+	xMm: 100 * Math.cos((at * Math.PI) / 4),
+	yMm: 100 * Math.sin((at * Math.PI) / 4)
+}));
+const first = (found: Outcome<string[]>, at: number): Outcome<number> =>
+	found.ok ? computed(Number(found.value[at])) : found;
+
+/** Orders of tightening where none is printed. */
+export const orderFormulas: readonly Formula[] = [
+	{
+		id: 'fasteners/sound-next',
+		works: soundNext,
+		formula:
+			'flange: largest least distance to the tight ones, then the bolt across; else least distance from the middle',
+		source: 'cross pattern of flange practice and centre-outward rule, common practice, no source',
+		example: {
+			says: 'eight around a flange, the first tight: the next',
+			gives: () => first(soundNext(flange, ['1']), 0),
+			wanted: 5,
+			within: 0.01
+		}
+	},
+	{
+		id: 'fasteners/order-from-middle',
+		works: orderFromMiddle,
+		formula: 'of the sound next bolts the one farthest from the pair tightened last, then by name',
+		source: 'common practice, no source; a printed order wins',
+		example: {
+			says: 'eight around a flange: the third of them',
+			gives: () => first(orderFromMiddle(flange), 2),
+			wanted: 3,
+			within: 0.01
+		}
+	},
+	{
+		id: 'fasteners/thirds',
+		works: thirdsNm,
+		formula: 'T/3, 2T/3, T',
+		source: 'common practice, no source; what the maker prints wins',
+		example: {
+			says: '75 N·m, the first stage',
+			gives: () => {
+				const found = thirdsNm(75);
+				return found.ok ? computed(found.value[0] ?? 0) : found;
+			},
+			wanted: 25,
+			within: 0.1
+		}
+	}
+];

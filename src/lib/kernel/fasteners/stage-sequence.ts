@@ -1,0 +1,41 @@
+import { cannot, computed, type Outcome } from '../outcome';
+import type { Stage } from './stage-plan';
+
+export type SequenceStep = { stage: number; bolt: string };
+
+/**
+ * A plan as the steps of the hand: every bolt through one stage before any begins the next.
+ *
+ * @param order bolt ids as they are tightened @param stages how many stages
+ * @returns stages counted from 1
+ * Source: US Army TM 10-3930-669-20, para E-4 (references OR01 and OR02).
+ * @example stageSequence(['a', 'b'], 2) // a 1, b 1, a 2, b 2
+ */
+export function stageSequence(order: readonly string[], stages: number): Outcome<SequenceStep[]> {
+	if (order.length === 0) return cannot('there is no bolt to tighten');
+	if (!Number.isInteger(stages) || stages < 1 || stages > 12)
+		return cannot('a plan has one to twelve stages');
+	return computed(
+		Array.from({ length: stages }, (_, at) => order.map((bolt) => ({ stage: at + 1, bolt }))).flat()
+	);
+}
+
+/**
+ * Stages of a third, two thirds and the whole of a torque, where the maker prints one figure only.
+ *
+ * Formula: T/3, 2T/3, T, each to a whole newton metre.
+ * @param torqueNm final torque T, N·m, at least 3
+ * @returns N·m, rising
+ * Source: common practice (references OR20 to OR22). What the maker prints wins.
+ * @example thirdsNm(90) // [30, 60, 90]
+ */
+export function thirdsNm(torqueNm: number): Outcome<number[]> {
+	if (!(torqueNm >= 3) || torqueNm > 1e5)
+		return cannot('a torque to be taken in thirds is at least 3 N·m');
+	return computed([Math.round(torqueNm / 3), Math.round((2 * torqueNm) / 3), torqueNm]);
+}
+
+/** All the angle that a plan turns after its last torque, degrees. */
+export function turnedDeg(stages: readonly Stage[]): number {
+	return stages.reduce((sum, one) => sum + ('angleDeg' in one ? one.angleDeg : 0), 0);
+}
