@@ -52,6 +52,14 @@ export function revisionsByIds(scope: SchoolScope, ids: readonly string[]) {
 	return read(scope, `${joined} AND r.id IN (:ids)`, { ids });
 }
 
+/** All revisions of one publication, the newest first. */
+export function revisionsOf(scope: SchoolScope, kind: PublicationKind, key: string) {
+	return read(scope, `${joined} AND p.kind = :kind AND p.key = :key ORDER BY r.number DESC`, {
+		kind,
+		key
+	});
+}
+
 /**
  * Publishes a body under a key. The same content again is no new revision.
  * @returns the revision that now stands, and whether it is new
