@@ -98,7 +98,7 @@ describe('uncertainty of a reading', () => {
 describe('a reading against its limits', () => {
 	it('works its example as by hand', () => {
 		const found = worked(ruling);
-		expect(text(found, 'ruling')).toMatch(/^Too close to call/);
+		expect(text(found, 'ruling')).toBe('Too close to call');
 		// (0.070 − 0.068) / 0.002 = 1; Φ(1) = 0.8413.
 		expect(figure(found, 'conformance')).toBeCloseTo(84.13, 2);
 		expect(figure(found, 'guard-band')).toBe(0.004);
@@ -107,7 +107,7 @@ describe('a reading against its limits', () => {
 	});
 	it('goes by the rule that is chosen, and names it', () => {
 		const found = worked(ruling, { value: '0.0666', rule: 'one-sided-95' });
-		expect(text(found, 'ruling')).toMatch(/^Within.+1\.645/);
+		expect(text(found, 'ruling')).toMatch(/^Within$/);
 		expect(text(worked(ruling, { value: '0.0666' }), 'ruling')).toMatch(/^Too close/);
 	});
 	it('JCGM 106, three examples', () => {

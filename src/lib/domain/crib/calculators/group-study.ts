@@ -88,9 +88,9 @@ export const groupStudy = calculator({
 					? anovaSteps(anova.value, group.value, meaning.value, decimals)
 					: rangeSteps(ranges.value, group.value, meaning.value, decimals),
 			notes: [
-				...(method === 'anova'
+				...(ranges.value.figures.categories !== anova.value.figures.categories
 					? [
-							`Averages and ranges tell ${sorts(ranges.value.figures.categories)} apart, analysis of variance ${sorts(figures.categories)}: say which one you used.`
+							`Averages and ranges tell ${sorts(ranges.value.figures.categories)} apart, analysis of variance ${sorts(anova.value.figures.categories)}: say which one you used.`
 						]
 					: []),
 				...ranges.value.overLimit.map(

@@ -72,7 +72,7 @@ export const ruling = calculator({
 				{
 					key: 'ruling',
 					words: 'Ruling',
-					text: `${names[found.value.ruling]}. ${found.value.because}`,
+					text: names[found.value.ruling],
 					main: true
 				},
 				{
@@ -83,7 +83,13 @@ export const ruling = calculator({
 					decimals: 2,
 					main: true
 				},
-				{ key: 'guard-band', words: 'Guard band (g)', value: guardBand, unit, decimals },
+				{
+					key: 'guard-band',
+					words: `Guard band, ${guardBandRules[rule].says}`,
+					value: guardBand,
+					unit,
+					decimals
+				},
 				...(least === undefined
 					? []
 					: [

@@ -3,6 +3,7 @@ import type { AnovaStudy } from '$lib/kernel/measurement/gauge-study/by-anova';
 import type { RangeStudy } from '$lib/kernel/measurement/gauge-study/by-ranges';
 import type { StudyFigures } from '$lib/kernel/measurement/gauge-study/figures';
 import type { StudyMeaning } from '$lib/kernel/measurement/gauge-study/meaning';
+import { mean, partMeans } from '$lib/kernel/measurement/gauge-study/study';
 import type { Step } from '../../../working';
 import type { Group } from './group';
 import { printed } from './printed';
@@ -62,7 +63,7 @@ export function anovaSteps(
 	const [n, k, r] = [parts.length, people.length, study[0]?.length ?? 0];
 	const ms = (row: AnovaRow) => row.meanSquare.toExponential(3);
 	const row = (words: string, rule: string, one: AnovaRow): Step => ({
-		words: `${words}: mean square, ${one.df} degrees of freedom${one.f === undefined ? '' : `, F ${printed(one.f, 2)}`}${one.p === undefined ? '' : `, by chance ${printed(100 * one.p, 1)} %`}`,
+		words: `${words}: mean square, ${one.df} degrees of freedom${one.f === undefined ? '' : `, F ${printed(one.f, 2)}`}${one.p === undefined ? '' : `, ${chance(one.p)}`}`,
 		rule,
 		formula: `${one.sumOfSquares.toExponential(3)} / ${one.df} = ${ms(one)} mm²`
 	});
@@ -75,7 +76,17 @@ export function anovaSteps(
 		unit: 'mm',
 		decimals
 	});
+	const means = (words: string, values: readonly number[]): Step => ({
+		words,
+		formula: `${values.map((one) => printed(one, decimals + 1)).join(', ')} mm`
+	});
 	return [
+		means('Mean of all readings', [mean(study.flat(2))]),
+		means(
+			`Means of ${people.join(', ')}`,
+			study.map((one) => mean(one.flat()))
+		),
+		means('Means of the parts, in their order', partMeans(study)),
 		row('Parts', 'MS_p = k r Σ (part mean − mean)² / (n − 1)', crossed.part),
 		row('People', 'MS_o = n r Σ (person’s mean − mean)² / (k − 1)', crossed.person),
 		...(crossed.interaction
@@ -116,6 +127,10 @@ export function anovaSteps(
 		),
 		...lastSteps(figures, meaning, decimals)
 	];
+}
+
+function chance(p: number): string {
+	return p < 0.001 ? 'by chance in less than 0.1 %' : `by chance in ${printed(100 * p, 1)} %`;
 }
 
 function lastSteps(figures: StudyFigures, meaning: StudyMeaning, decimals: number): Step[] {

@@ -45,6 +45,8 @@ export function readingSteps(asked: ReadingAsked, found: ReadingFound): Step[] {
 			: []),
 		{
 			words: 'Coverage factor for 95 %: Student’s t for ν cut to a whole number, never below 2',
+			rule: 'k = t(97.5 %, ⌊ν⌋), at least 2',
+			formula: tFor(budget.degreesOfFreedom),
 			value: budget.coverageFactor,
 			unit: '',
 			decimals: 3
@@ -56,6 +58,10 @@ export function readingSteps(asked: ReadingAsked, found: ReadingFound): Step[] {
 			...mm(budget.expanded, places)
 		}
 	];
+}
+
+function tFor(degrees: number): string {
+	return Number.isFinite(degrees) ? `t(97.5 %, ${Math.floor(degrees)})` : 't(97.5 %, ∞), so 2';
 }
 
 function repeatSteps(
