@@ -7,7 +7,6 @@ import { stressAreaIn2, stressAreaMm2 } from '$lib/kernel/fasteners/stress-area'
 import { firstWrongStep, loosening, orderFromMiddle } from '$lib/kernel/fasteners/tightening-order';
 import { travelMm } from '$lib/kernel/fasteners/turn';
 
-type Lever = { torque: number; lengthL: number; extensionE: number; angleDeg: number };
 const value = (outcome: { ok: true; value: number } | { ok: false; because: string }) => {
 	if (!outcome.ok) throw new Error(outcome.because);
 	return outcome.value;
