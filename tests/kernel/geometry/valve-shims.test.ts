@@ -203,6 +203,18 @@ describe('a plan of shims', () => {
 		);
 		expect(plan.choices.map((one) => one.from)).toEqual(['stays', 'stays']);
 	});
+	it('leaves what is right where it is asked to, even if that means to buy', () => {
+		// What I1 gives away would serve I2, and the box has something for I1.
+		const valves = [
+			{ name: 'I1', shimMm: 2.48, lashMm: 0.22, ...inlet },
+			{ name: 'I2', shimMm: 2.4, lashMm: 0.27, ...inlet }
+		];
+		const moving = value(shimPlan(valves, [2.52], sizes));
+		const staying = value(shimPlan(valves, [2.52], sizes, 'stays'));
+		expect(moving.choices.map((one) => one.from)).toEqual(['box', 'valve']);
+		expect(staying.choices.map((one) => one.from)).toEqual(['stays', 'bought']);
+		expect([moving.bought, staying.bought]).toEqual([0, 1]);
+	});
 	it('takes the end of the series where that still ends within limits', () => {
 		const plan = value(shimPlan([{ name: 'I1', shimMm: 2.9, lashMm: 0.315, ...inlet }], [], sizes));
 		expect(plan.buy).toEqual([{ sizeMm: 3, count: 1 }]);
@@ -308,6 +320,22 @@ describe('a plan of shims', () => {
 				const before = [...valves.map((one) => one.shimMm), ...loose, ...boughtMm];
 				const after = [...choices.map((one) => one.shimMm), ...spareMm];
 				expect(after.toSorted()).toEqual(before.toSorted());
+			})
+		);
+	});
+	it('asked to leave what is right, touches no valve within its limits and no other plan buys more', () => {
+		fc.assert(
+			fc.property(engine, box, (valves, loose) => {
+				const [moving, staying] = [
+					shimPlan(valves, loose, sizes),
+					shimPlan(valves, loose, sizes, 'stays')
+				];
+				fc.pre(moving.ok && staying.ok);
+				expect(value(moving).bought).toBeLessThanOrEqual(value(staying).bought);
+				for (const [at, one] of valves.entries()) {
+					const right = one.lashMm >= one.leastMm - 1e-9 && one.lashMm <= one.mostMm + 1e-9;
+					if (right) expect(value(staying).choices[at]?.from).toBe('stays');
+				}
 			})
 		);
 	});

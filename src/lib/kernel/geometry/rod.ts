@@ -25,7 +25,13 @@ export function outOfLinePer100Mm(small: MandrelReadings, big?: MandrelReadings)
 			return cannot('a dial reading is a number in millimetres');
 	}
 	const tilt = (one: MandrelReadings) => ((one.farMm - one.nearMm) / one.apartMm) * 100;
-	return computedNumber(tidy(tilt(small) - (big ? tilt(big) : 0)));
+	const found = tidy(tilt(small) - (big ? tilt(big) : 0));
+	// Ten millimetres in a hundred are nearly six degrees: that is seen, not measured.
+	return Math.abs(found) <= 10
+		? computedNumber(found)
+		: cannot(
+				'no rod stands that far out of line: look at the readings and the distance between them'
+			);
 }
 
 /** What each reading has in the result of `outOfLinePer100Mm`, far and near of each mandrel. */

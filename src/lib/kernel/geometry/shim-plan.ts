@@ -2,7 +2,8 @@ import { cannot, computed, type Outcome } from '../outcome';
 import { cheapestAssignment } from './assignment';
 import { tidy } from './diameter-grid';
 import { faultIn, middleMm, spaceMm, type ShimmedValve } from './shimmed-valve';
-import { nearestShimMm, shimCount, type ShimSizes } from './valve-lash';
+import { impossible, shimCosts, soldFor } from './shim-costs';
+import { shimCount, type ShimSizes } from './valve-lash';
 
 export type ShimChoice = {
 	valve: string;
@@ -26,22 +27,14 @@ export type ShimPlan = {
 };
 
 /**
- * A cost is one whole number: nothing that fits, then shims bought, then tenths of a micrometre off
- * the middle, then shims moved. Each counts for more than all of the next together.
- */
-const moved = 1;
-const tenthOfMicrometre = 2 ** 7;
-const purchase = 2 ** 31;
-const impossible = 2 ** 38;
-
-/**
  * Which shim goes to which valve, from the fitted ones and a box of loose ones, so that every lash
  * ends within its limits: with the fewest shims bought, then the smallest sum of departures from
  * the middle of the limits, then the fewest shims moved. Exact, as an assignment problem.
  *
  * Formula: lash = A + T − N of the shim N that goes in.
  * @param valves mm, up to 64; each lash above zero @param boxMm loose shims, mm
- * @param sizes in which new ones are sold, mm
+ * @param sizes in which new ones are sold, mm @param within whether a valve whose lash is right as
+ * found keeps its shim, or may give it away for a better sum
  * @returns the plan; "cannot" names the valves that no shim brings within their limits
  * Source: the shop rule N = T + (A − V); H. W. Kuhn (1955) for the choice.
  * @example shimPlan([{ name: '1', shimMm: 2.5, lashMm: 0.3, leastMm: 0.18, mostMm: 0.22 }], [],
@@ -50,7 +43,8 @@ const impossible = 2 ** 38;
 export function shimPlan(
 	valves: readonly ShimmedValve[],
 	boxMm: readonly number[],
-	sizes: ShimSizes
+	sizes: ShimSizes,
+	within: 'may-move' | 'stays' = 'may-move'
 ): Outcome<ShimPlan> {
 	const fault = faultIn(valves, boxMm);
 	if (fault) return cannot(fault);
@@ -58,10 +52,7 @@ export function shimPlan(
 	if (!count.ok) return count;
 	const hand = [...valves.map((one) => one.shimMm), ...boxMm];
 	const sold = valves.map((valve) => soldFor(valve, sizes));
-	const costs = valves.map((valve, row) => [
-		...hand.map((shim, at) => costOf(valve, shim) + (at === row ? 0 : moved)),
-		...sold.map((size, column) => (column === row ? purchase + costOf(valve, size) : impossible))
-	]);
+	const costs = shimCosts(valves, hand, sold, within);
 	const taken = cheapestAssignment(costs);
 	const left = valves.filter((_, row) => (costs[row]?.[taken[row] ?? 0] ?? 0) >= impossible);
 	if (left.length > 0) return cannot(notServed(left.map((one) => one.name)));
@@ -82,20 +73,6 @@ export function shimPlan(
 	});
 	const spareMm = hand.filter((_, at) => !taken.includes(at)).toSorted((a, b) => a - b);
 	return computed({ ...boughtIn(choices), choices, spareMm });
-}
-
-/** The sold size that brings a valve nearest to the middle of its limits. */
-function soldFor(valve: ShimmedValve, sizes: ShimSizes): number {
-	const wanted = spaceMm(valve) - middleMm(valve);
-	// The smallest or largest that is sold may still end within limits: the cost says whether it does.
-	const found = nearestShimMm(Math.min(sizes.toMm, Math.max(sizes.fromMm, wanted)), sizes);
-	return found.ok ? found.value : sizes.fromMm;
-}
-
-function costOf(valve: ShimmedValve, shimMm: number): number {
-	const lash = tidy(spaceMm(valve) - shimMm);
-	if (lash < valve.leastMm - 1e-9 || lash > valve.mostMm + 1e-9) return impossible;
-	return Math.round(Math.abs(lash - middleMm(valve)) * 1e4) * tenthOfMicrometre;
 }
 
 function notServed(names: readonly string[]): string {

@@ -2,7 +2,8 @@ import { formatQuantity } from '$lib/kernel/quantity/format-quantity';
 
 /** A figure as it is put into a formula, with a true minus. */
 export function figure(value: number, decimals = 3): string {
-	return formatQuantity(value, '', 10 ** -decimals);
+	// Not 10 ** −4, which is a hair less than 0.0001.
+	return formatQuantity(value, '', Number(`1e-${decimals}`));
 }
 
 /** The same after a sign of its own: what lies below zero stands in brackets. */

@@ -4,7 +4,7 @@ import { cannot, computed, type Outcome } from '$lib/kernel/outcome';
 import type { DataSheet } from '../../data-sheets/schema';
 import type { Step } from '../../working';
 import { calculator, type Preset } from '../calculator';
-import { list, quantity, table, type TableRow } from '../field';
+import { choice, list, quantity, table, type TableRow } from '../field';
 import { figure } from './formula-figures';
 
 const length = { dimension: 'length', unit: { metric: 'mm', inch: 'in' } } as const;
@@ -46,14 +46,23 @@ export const valveShims = calculator({
 			optional: true,
 			example: '2.40; 2.56; 2.70'
 		}),
+		within: choice({
+			words: 'Valves that are within their limits',
+			options: [
+				{ value: 'stays', words: 'Keep their shims' },
+				{ value: 'may-move', words: 'May change theirs' }
+			],
+			hint: 'What may change can save a shim to buy.',
+			example: 'may-move'
+		}),
 		from: quantity({ ...shim, words: 'Shims are sold from', example: '2.00' }),
 		to: quantity({ ...shim, words: 'up to', example: '3.00' }),
 		step: quantity({ ...shim, least: 0.001, words: 'in steps of', decimals: 3, example: '0.05' })
 	},
-	work({ valves: rows, box = [], from, to, step, ...limits }) {
+	work({ valves: rows, box = [], within, from, to, step, ...limits }) {
 		const valves = valvesOf(rows, limits);
 		if (!valves.ok) return valves;
-		const plan = shimPlan(valves.value, box, { fromMm: from, toMm: to, stepMm: step });
+		const plan = shimPlan(valves.value, box, { fromMm: from, toMm: to, stepMm: step }, within);
 		if (!plan.ok) return plan;
 		const { choices, buy, bought, totalOffMm, spareMm } = plan.value;
 		return computed({

@@ -1,6 +1,8 @@
 /** A face seen from above with what was read on it, and its worst line seen from the side. */
 export type FaceDrawing = {
 	kind: 'face';
+	/** What the marked readings hold: two planes, or the thickest feeler. */
+	rests: 'planes' | 'feeler';
 	lengthMm: number;
 	widthMm: number;
 	places: {

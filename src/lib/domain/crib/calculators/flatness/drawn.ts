@@ -5,13 +5,14 @@ import type { Overall } from './overall';
 /** The face with its readings, and its worst line from the side. */
 export function drawnFace(
 	{ alongMm, acrossMm }: FaceGrid,
-	{ places, words, valueMm }: Overall,
+	{ places, words, valueMm, rests }: Overall,
 	worst: WorstLine | undefined
 ): FaceDrawing {
 	const [x0 = 0, y0 = 0] = [alongMm[0], acrossMm[0]];
 	const says = `${words} ${valueMm.toFixed(3)} mm`;
 	return {
 		kind: 'face',
+		rests,
 		lengthMm: (alongMm.at(-1) ?? 0) - x0,
 		widthMm: (acrossMm.at(-1) ?? 0) - y0,
 		places: places.map(({ xMm, yMm, text, part, holds }) => ({

@@ -9,6 +9,7 @@ import { placeWords, zoneStep } from './steps';
 export type Overall = {
 	words: string;
 	valueMm: number;
+	rests: 'planes' | 'feeler';
 	/** What each reading that it rests on has in it. */
 	weights: readonly number[];
 	steps: Step[];
@@ -24,6 +25,7 @@ export function overallByDial(points: readonly (FacePoint & Cell)[]): Outcome<Ov
 	return computed({
 		words: 'Flatness overall',
 		valueMm: widthMm,
+		rests: 'planes',
 		weights: held.map((one) => one.weight),
 		steps: [zoneStep(points, held, widthMm)],
 		notes: [
@@ -52,6 +54,7 @@ export function overallByFeeler(
 	return computed({
 		words: 'Largest gap',
 		valueMm: largest.value,
+		rests: 'feeler',
 		weights: [1],
 		steps: [
 			{
