@@ -12,6 +12,8 @@ const figures = figuresOf(sheet);
 
 /** Every sum, asked of the demo's data sheet, and the largest answer that a bench could give. */
 const asked: [SumName, Record<string, unknown>, number][] = [
+	['called-within', { of: 'crankpin.diameter', purpose: 'build', edge: 'up-to' }, 39.996],
+	['called-within', { of: 'crankpin.diameter', purpose: 'run-again', edge: 'from' }, 39.98],
 	['displacement', { bore: 'cylinder.bore', stroke: 'crankshaft.stroke', cylinders: 3 }, 1200],
 	['fit-clearance', { outer: 'cylinder.bore', inner: 'piston.diameter' }, 0.2],
 	[
@@ -25,11 +27,17 @@ const asked: [SumName, Record<string, unknown>, number][] = [
 		0.15
 	],
 	['out-of-round', { of: 'crankpin.diameter' }, 0.02],
+	['reading-uncertainty', { of: 'crankpin.diameter', readings: 1, ask: 'expanded' }, 0.01],
+	['reading-uncertainty', { of: 'crankpin.diameter', readings: 4, ask: 'standard' }, 0.01],
+	['reading-uncertainty', { of: 'crankpin.diameter', readings: 5, ask: 'scatter' }, 0.02],
 	['ring-gap', { bore: 'cylinder.bore', gap: 'ring.topGap' }, 1],
 	['sheet-value', { of: 'crankpin.diameter', part: 'wearLimit' }, 40],
 	['stage-turn', { tightening: 'head.bolt', ask: 'degrees' }, 180],
 	['stage-turn', { tightening: 'head.bolt', ask: 'travel' }, 1.25],
 	['taper', { of: 'crankpin.diameter' }, 0.02],
+	['tool-for-limits', { of: 'crankpin.diameter', ask: 'needed' }, 0.002],
+	['tool-for-limits', { of: 'crankpin.bearingBore', ask: 'expanded' }, 0.035],
+	['tool-for-limits', { of: 'cylinder.bore', ask: 'ratio' }, 20],
 	['torque-with-extension', { tightening: 'head.bolt', angle: 'straight', ask: 'wrench' }, 30],
 	['torque-with-extension', { tightening: 'head.bolt', angle: 'any', ask: 'fastener' }, 60],
 	['valve-shim', { lash: 'valve.inletLash' }, 3],

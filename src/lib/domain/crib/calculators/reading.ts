@@ -141,7 +141,15 @@ function workedOf(found: ReadingFound, readingsMm: readonly number[], working: S
 			},
 			{ key: 'mean', words: 'Mean as read', value: meanMm, ...mm },
 			...(repeats
-				? [{ key: 'scatter', words: 'Scatter of one reading (s)', value: repeats.deviation, ...mm }]
+				? [
+						{
+							key: 'scatter',
+							words: 'Scatter of one reading (s)',
+							value: repeats.deviation,
+							unit: 'mm',
+							decimals: decimals + 1
+						}
+					]
 				: []),
 			{
 				key: 'standard',

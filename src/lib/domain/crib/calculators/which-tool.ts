@@ -146,7 +146,7 @@ function workedOf(
 				words: `Ratio with ${shown.name}`,
 				value: shown.judgement.ratio,
 				unit: '',
-				decimals: 1
+				decimals: 2
 			},
 			...judged.map(({ name, judgement }, at) => ({
 				key: `tool-${at + 1}`,
@@ -154,7 +154,7 @@ function workedOf(
 				text: `${judgement.ratio.toFixed(1)} to 1: ${verdictWords[judgement.verdict]}`
 			}))
 		],
-		working: toolSteps(asked, tools, judged, readings, decimals),
+		working: toolSteps(asked, tools, judged, readings, neededMm, decimals),
 		notes: repeatNotes(tools, judged, readings, neededMm),
 		drawing: {
 			kind: 'tool-zones',

@@ -3,7 +3,8 @@ import { cannot, computed, type Outcome } from '$lib/kernel/outcome';
 import type { Random } from '$lib/kernel/random/random';
 import type { Calculator } from '../../crib/calculator';
 import type { Fields, ValuesOf } from '../../crib/field';
-import { isFigure } from '../../crib/worked';
+import { isFigure, type FigureLine } from '../../crib/worked';
+import type { Step } from '../../working';
 import type { SheetFigures } from '../sheet-figures';
 import type { Given, Sum } from './sum';
 
@@ -34,16 +35,34 @@ export function sumOf<P, F extends Fields>(given: {
 		draw: (asked, random, sheet) => draw(asked, random, sheet),
 		prompt: ({ prompt }) => prompt,
 		given: (drawn) => drawn.given,
-		expected({ values, ask }) {
-			const worked = calculator.work(values);
-			if (!worked.ok) return worked;
-			const line = worked.value.lines.find((one) => one.key === ask);
-			if (!line || !isFigure(line)) return cannot(`${calculator.title} gives no figure ${ask}`);
-			return computed({ value: line.value, unit: line.unit, decimals: line.decimals });
+		expected(drawn) {
+			const found = askedOf(calculator, drawn);
+			if (!found.ok) return found;
+			const { value, unit, decimals } = found.value.line;
+			return computed({ value, unit, decimals });
 		},
-		working({ values }) {
-			const worked = calculator.work(values);
-			return worked.ok ? worked.value.working : [];
+		working(drawn) {
+			const found = askedOf(calculator, drawn);
+			if (!found.ok) return [];
+			const { line, working } = found.value;
+			// What the calculator goes on to say after this is another question's.
+			const at = working.findLastIndex(
+				({ value, unit }) => unit === line.unit && value === line.value
+			);
+			return at < 0 ? working : working.slice(0, at + 1);
 		}
 	};
+}
+
+function askedOf<F extends Fields>(
+	calculator: Calculator<F>,
+	{ values, ask }: DrawnFigures<F>
+): Outcome<{ line: FigureLine; working: Step[] }> {
+	const worked = calculator.work(values);
+	if (!worked.ok) return worked;
+	const { lines, working } = worked.value;
+	const line = lines.find((one) => one.key === ask);
+	return line && isFigure(line)
+		? computed({ line, working })
+		: cannot(`${calculator.title} gives no figure ${ask}`);
 }

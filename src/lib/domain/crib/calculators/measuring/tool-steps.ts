@@ -1,6 +1,6 @@
 import { sharedMm, type InHand } from '$lib/kernel/measurement/in-hand';
 import { repeatsNeeded } from '$lib/kernel/measurement/repeats';
-import type { Asked, ToolVerdict } from '$lib/kernel/measurement/tool';
+import { usualRatio, type Asked, type ToolVerdict } from '$lib/kernel/measurement/tool';
 import type { ToolChoice } from '$lib/kernel/measurement/tool-choice';
 import { coverageFactor } from '$lib/kernel/measurement/uncertainty';
 import type { Step } from '../../../working';
@@ -22,11 +22,20 @@ export function toolSteps(
 	tools: readonly NamedTool[],
 	judged: Judged,
 	readings: number,
+	neededMm: number,
 	decimals: number
 ): Step[] {
 	const both = least !== undefined && most !== undefined;
 	const width = both ? `(${printed(most, decimals)} − ${printed(least, decimals)})` : room;
-	return judged.flatMap(({ name, expanded, judgement }, at): Step[] => {
+	const needed: Step = {
+		words: 'What is needed to judge',
+		rule: both ? `U = (most − least) / (2 · ${usualRatio})` : `U = room / ${usualRatio}`,
+		formula: both ? `${width} / (2 · ${usualRatio})` : `${width} / ${usualRatio}`,
+		value: neededMm,
+		unit: 'mm',
+		decimals
+	};
+	const steps = judged.flatMap(({ name, expanded, judgement }, at): Step[] => {
 		const tool = tools[at];
 		if (!tool) return [];
 		const { scatterMm, leastCountMm, calibrationMm } = tool;
@@ -46,10 +55,11 @@ export function toolSteps(
 				formula: both ? `${width} / (2 · ${U})` : `${width} / ${U}`,
 				value: judgement.ratio,
 				unit: '',
-				decimals: 1
+				decimals: 2
 			}
 		];
 	});
+	return [needed, ...steps];
 }
 
 /** For each tool that falls short whether measuring again would mend that. */
