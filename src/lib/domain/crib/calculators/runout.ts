@@ -106,7 +106,7 @@ export const runout = calculator({
 					main: true
 				},
 				{ key: 'eccentricity', words: 'Middle off its axis, fitted', value: off, ...mm },
-				{ key: 'high', words: 'Towards', value: highAtDeg, unit: '°', decimals: 0 },
+				{ key: 'high', words: 'Its high side towards', value: highAtDeg, unit: '°', decimals: 0 },
 				{ key: 'out-of-round', words: 'Left over: out of round', value: outOfRoundMm, ...mm }
 			],
 			working: [...steps(at, turn.value, half.value, evenly), ...rulings.value.steps],
@@ -146,16 +146,21 @@ export const runout = calculator({
 /** Readings with their angles; evenly spread where none is given. */
 function turnOf(rows: readonly TableRow[]): Outcome<{ at: AtAngle[]; evenly: boolean }> {
 	const angles = rows.map((row) => row.angle);
-	const evenly = angles.every((one) => one === null);
+	const none = angles.every((one) => one === null);
 	const missing = angles.findIndex((one) => typeof one !== 'number');
-	if (!evenly && missing >= 0)
+	if (!none && missing >= 0)
 		return cannot(`reading ${missing + 1} has no angle: give every angle, or none`);
+	const at = rows.map(({ angle, read }, one) => ({
+		angleDeg: typeof angle === 'number' ? angle : (one * 360) / rows.length,
+		readMm: typeof read === 'number' ? read : 0
+	}));
+	const [first] = at;
 	return computed({
-		evenly,
-		at: rows.map(({ angle, read }, one) => ({
-			angleDeg: typeof angle === 'number' ? angle : (one * 360) / rows.length,
-			readMm: typeof read === 'number' ? read : 0
-		}))
+		at,
+		evenly: at.every(
+			({ angleDeg }, one) =>
+				Math.abs(angleDeg - (first?.angleDeg ?? 0) - (one * 360) / at.length) < 1e-6
+		)
 	});
 }
 

@@ -39,6 +39,7 @@ export const temperature = calculator({
 		'geometry/growth',
 		'geometry/reading-of',
 		'measurement/temperature',
+		'measurement/combined-standard',
 		'measurement/ruling'
 	],
 	sources: ['Coefficients: published tables, taken as right to a tenth.'],
@@ -95,11 +96,13 @@ export const temperature = calculator({
 			at20: at20Mm(reading, warm.part, warm.instrument),
 			correction: growthApartMm(reading, growthOf(warm.instrument), growthOf(warm.part)),
 			partGrowth: growthMm(reading, growthOf(warm.part)),
-			instrumentGrowth: growthMm(reading, growthOf(warm.instrument)),
-			expanded: expandedAt20(warm, rest.uncertainty ?? 0)
+			instrumentGrowth: growthMm(reading, growthOf(warm.instrument))
 		});
 		if (!found.ok) return found;
-		const { at20, correction, partGrowth, instrumentGrowth, expanded } = found.value;
+		const { at20, correction, partGrowth, instrumentGrowth } = found.value;
+		const doubt = expandedAt20(warm, rest.uncertainty ?? 0);
+		if (!doubt.ok) return doubt;
+		const { expanded, parts } = doubt.value;
 		const rulings = ruledAt20(at20, expanded, rest);
 		if (!rulings.ok) return rulings;
 		const limits = limitLines(rest, warm);
@@ -148,6 +151,13 @@ export const temperature = calculator({
 					value: at20,
 					unit: 'mm',
 					decimals: 3
+				},
+				{
+					words: `Its uncertainty, from ${parts.map((one) => one.name.toLowerCase()).join(', ')}`,
+					rule: 'U = 2 · √(Σ (sensitivity · u)²)',
+					formula: `2 · √(${parts.map((one) => `${figure(Math.abs(one.sensitivity * one.standard), 5)}²`).join(' + ')})`,
+					value: expanded,
+					...fine
 				}
 			],
 			rulings: rulings.value,

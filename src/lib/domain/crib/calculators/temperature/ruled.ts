@@ -1,6 +1,7 @@
 import { alloysDifferBy } from '$lib/kernel/geometry/expansion';
 import type { Body } from '$lib/kernel/geometry/temperature';
 import { combinedStandard } from '$lib/kernel/measurement/combined';
+import type { Component } from '$lib/kernel/measurement/component';
 import { ruleReading } from '$lib/kernel/measurement/ruling';
 import { temperatureComponents } from '$lib/kernel/measurement/sources-of-uncertainty';
 import { coverageFactor, expandedMm } from '$lib/kernel/measurement/uncertainty';
@@ -10,8 +11,11 @@ import type { RuledReading } from '../../worked';
 /** A reading with what was warm when it was taken, and how well that is known. */
 export type Warm = { readMm: number; part: Body; instrument: Body; withinK: number };
 
-/** Expanded uncertainty of a size brought to 20 °C: the reading's own, the thermometers', the tables'. */
-export function expandedAt20(warm: Warm, readingExpandedMm: number): Outcome<number> {
+/** What a size brought to 20 °C is uncertain by: the reading's own, the thermometers', the tables'. */
+export function expandedAt20(
+	warm: Warm,
+	readingExpandedMm: number
+): Outcome<{ expanded: number; parts: Component[] }> {
 	const doubt = (body: Body) => ({
 		...body,
 		temperatureWithinC: warm.withinK,
@@ -19,7 +23,7 @@ export function expandedAt20(warm: Warm, readingExpandedMm: number): Outcome<num
 	});
 	const parts = temperatureComponents(warm.readMm, doubt(warm.part), doubt(warm.instrument));
 	if (!parts.ok) return parts;
-	const combined = combinedStandard([
+	const all: Component[] = [
 		{
 			name: 'Reading',
 			type: 'B',
@@ -28,8 +32,9 @@ export function expandedAt20(warm: Warm, readingExpandedMm: number): Outcome<num
 			degreesOfFreedom: Infinity
 		},
 		...parts.value
-	]);
-	return combined.ok ? computed(expandedMm(combined.value)) : combined;
+	];
+	const combined = combinedStandard(all);
+	return combined.ok ? computed({ expanded: expandedMm(combined.value), parts: all }) : combined;
 }
 
 /** Rules the size at 20 °C where the reading's uncertainty and a printed limit are given. */
