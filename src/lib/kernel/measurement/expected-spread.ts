@@ -69,7 +69,7 @@ export function trueSpread(
 	if (!equals.ok) return equals;
 	if (shown <= equals.value) return computed({ estimate: 0, added: shown });
 	let [low, high] = [0, shown];
-	for (let step = 0; step < 44; step++) {
+	for (let step = 0; step < 30; step++) {
 		const middle = (low + high) / 2;
 		const found = showing(middle);
 		if (!found.ok) return found;
