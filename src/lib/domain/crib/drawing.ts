@@ -1,3 +1,7 @@
+import type { ThreadProfileDrawing } from './drawings/thread-profile';
+import type { TorqueAngleDrawing } from './drawings/torque-angle';
+import type { TorqueSharesDrawing } from './drawings/torque-shares';
+import type { BoltLoadDrawing } from './drawings/bolt-load';
 import type { BudgetDrawing } from './drawings/budget';
 import type { ClearanceDrawing } from './drawings/clearance';
 import type { ConformanceDrawing } from './drawings/conformance';
@@ -23,4 +27,8 @@ export type Drawing =
 	| BudgetDrawing
 	| ConformanceDrawing
 	| GroupStudyDrawing
-	| ToolZonesDrawing;
+	| ToolZonesDrawing
+	| BoltLoadDrawing
+	| TorqueSharesDrawing
+	| TorqueAngleDrawing
+	| ThreadProfileDrawing;

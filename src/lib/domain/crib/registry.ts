@@ -7,11 +7,19 @@ import { rod } from './calculators/rod';
 import { ruling } from './calculators/ruling';
 import { runout } from './calculators/runout';
 import { temperature } from './calculators/temperature';
+import { friction } from './calculators/friction';
+import { preload } from './calculators/preload';
+import { thread } from './calculators/thread';
+import { torqueAngle } from './calculators/torque-angle';
 import { valveShims } from './calculators/valve-shims';
 import { whichTool } from './calculators/which-tool';
 
 /** One line a calculator. */
 export const calculators: readonly AnyCalculator[] = [
+	preload,
+	friction,
+	torqueAngle,
+	thread,
 	oilClearance,
 	flatness,
 	rod,

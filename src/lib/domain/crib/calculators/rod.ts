@@ -150,9 +150,9 @@ function plane(
 		weights: outOfLineWeights(small, big),
 		step: {
 			words: big ? 'small end’s mandrel less big end’s' : 'small end’s mandrel',
-			rule: big ? '(far − near) / S · 100, less the same of the big end' : '(far − near) / S · 100',
-			formula: big ? `${tilt(small)} − (${tilt(big)})` : tilt(small),
-			value: found.value,
+			rule: `|(far − near) / S · 100${big ? ', less the same of the big end' : ''}|`,
+			formula: `|${tilt(small)}${big ? ` − (${tilt(big)})` : ''}|`,
+			value: Math.abs(found.value),
 			unit: 'mm',
 			decimals: 3
 		}

@@ -91,7 +91,10 @@ export const valveShims = calculator({
 					? [{ key: 'spare', words: 'Left over, mm', text: spareMm.map(two).join('; ') }]
 					: [])
 			],
-			working: valves.value.flatMap((valve, at) => stepsOf(valve, choices[at])),
+			working: [
+				...valves.value.flatMap((valve, at) => stepsOf(valve, choices[at])),
+				{ words: 'Shims bought: no other plan needs fewer', value: bought, unit: '', decimals: 0 }
+			],
 			notes: [
 				'Measure every lash again with the new shims in. Clear the ones left over into the box with their measured size.'
 			],

@@ -1,5 +1,9 @@
 import type { Component } from 'svelte';
 import type { Drawing } from '$lib/domain/crib/drawing';
+import BoltLoad from './BoltLoad.svelte';
+import TorqueShares from './TorqueShares.svelte';
+import TorqueAngle from './TorqueAngle.svelte';
+import ThreadProfile from './ThreadProfile.svelte';
 import Budget from './Budget.svelte';
 import Clearance from './Clearance.svelte';
 import Conformance from './Conformance.svelte';
@@ -24,7 +28,11 @@ const components: Drawn = {
 	budget: Budget,
 	conformance: Conformance,
 	'group-study': GroupStudy,
-	'tool-zones': ToolZones
+	'tool-zones': ToolZones,
+	'bolt-load': BoltLoad,
+	'torque-shares': TorqueShares,
+	'torque-angle': TorqueAngle,
+	'thread-profile': ThreadProfile
 };
 
 export function drawingComponent(kind: Drawing['kind']): Component<{ drawing: Drawing }> {
