@@ -1,11 +1,18 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { crushOf, freeSpreadMm } from '$lib/kernel/geometry/bearing-shell';
-import { deckHeight, endFloatMm, ringGapGrowthMm } from '$lib/kernel/geometry/end-play';
+import { crushFromGap, crushOf, freeSpreadMm } from '$lib/kernel/geometry/bearing-shell';
+import {
+	deckHeight,
+	endFloatMm,
+	ringGapGrowthMm,
+	ringGapInMm
+} from '$lib/kernel/geometry/end-play';
 import { clearanceFromShellsMm, fitOf, ofDiameter } from '$lib/kernel/geometry/fit';
 import { onScaleMm, threadClearance } from '$lib/kernel/geometry/gauging-thread';
+import { gasketFor } from '$lib/kernel/geometry/gasket-class';
 import { extremesOf, shapeOf } from '$lib/kernel/geometry/grid-shape';
 import { nextSize } from '$lib/kernel/geometry/next-size';
+import { chooseShells } from '$lib/kernel/geometry/shell-choice';
 import type { Outcome } from '$lib/kernel/outcome';
 
 function value<T>(found: Outcome<T>): T {
@@ -14,14 +21,12 @@ function value<T>(found: Outcome<T>): T {
 }
 const number = (min: number, max: number) => fc.double({ min, max, noNaN: true });
 const reading = fc.integer({ min: 73_900, max: 74_200 }).map((one) => one / 1000);
-const grid = fc
-	.integer({ min: 1, max: 4 })
-	.chain((planes) =>
-		fc.array(fc.array(reading, { minLength: planes, maxLength: planes }), {
-			minLength: 3,
-			maxLength: 6
-		})
-	);
+const grid = fc.integer({ min: 1, max: 4 }).chain((planes) =>
+	fc.array(fc.array(reading, { minLength: planes, maxLength: planes }), {
+		minLength: 3,
+		maxLength: 6
+	})
+);
 
 describe('the shape along a bore', () => {
 	it.each([
@@ -202,5 +207,71 @@ describe('floats, gaps, decks', () => {
 			}),
 			{ numRuns: 1000 }
 		);
+	});
+});
+
+describe('shells and gaskets chosen', () => {
+	const limits = { leastMm: 0.02, mostMm: 0.048 };
+	it('a shell lies inside the limits, and no listed one lies nearer their middle', () => {
+		const walls = fc.array(number(1.47, 1.5), { minLength: 1, maxLength: 6 });
+		fc.assert(
+			fc.property(walls, (these) => {
+				const found = chooseShells(43, 39.99, these, limits);
+				const off = these.map((one) => Math.abs(43 - 2 * one - 39.99 - 0.034));
+				if (!found.ok) expect(Math.min(...off)).toBeGreaterThan(0.014 - 2e-6);
+				else {
+					expect(off[found.value.chosen]).toBeLessThanOrEqual(0.014 + 2e-6);
+					expect(off[found.value.chosen]).toBeLessThanOrEqual(Math.min(...off) + 2e-6);
+				}
+			})
+		);
+		expect(chooseShells(43, 39.99, [], limits)).toMatchObject({ ok: false });
+		expect(chooseShells(43, 39.99, [1.489], { leastMm: 0.05, mostMm: 0.02 })).toMatchObject({
+			ok: false
+		});
+		const none = chooseShells(43, 39.8, [1.489], limits);
+		expect(none.ok ? '' : none.because).toContain('no listed shell');
+	});
+	it('a gasket goes by the highest piston alone', () => {
+		const classes = [
+			{ name: 'one notch', leastMm: 0.4, mostMm: 0.49 },
+			{ name: 'two notches', leastMm: 0.5, mostMm: 0.59 }
+		];
+		expect(gasketFor([0.42, 0.52, 0.41], classes)).toEqual({
+			ok: true,
+			value: { name: 'two notches', decidedBy: 1 }
+		});
+		fc.assert(
+			fc.property(number(0.4, 0.49), number(-0.1, 0.4), (highest, lower) => {
+				expect(value(gasketFor([lower, highest], classes)).name).toBe('one notch');
+			})
+		);
+		for (const odd of [[], [0.495], [0.7], [NaN]])
+			expect(gasketFor(odd, classes)).toMatchObject({ ok: false });
+		expect(gasketFor([0.45], [])).toMatchObject({ ok: false });
+	});
+	it('crush read as a gap is half of it a shell, and agrees with crush by length', () => {
+		fc.assert(
+			fc.property(number(0, 0.2), (gap) => {
+				const read = value(crushFromGap(gap));
+				const byLength = value(crushOf((Math.PI * 43) / 2 + gap / 2, 43));
+				expect(read.crushMm).toBeCloseTo(byLength.crushMm, 5);
+				expect(read.interferenceMm).toBeCloseTo(byLength.interferenceMm, 5);
+			})
+		);
+		for (const odd of [-0.01, 3, NaN]) expect(crushFromGap(odd)).toMatchObject({ ok: false });
+	});
+	it('a ring’s gap goes back to what it was in the bore that it came from', () => {
+		fc.assert(
+			fc.property(number(0.2, 1), number(0, 0.2), (gap, wider) => {
+				const there = value(ringGapInMm(gap, wider));
+				expect(there).toBeGreaterThanOrEqual(gap - 1e-6);
+				expect(value(ringGapInMm(there, -wider))).toBeCloseTo(gap, 5);
+			})
+		);
+		const butts = ringGapInMm(0.1, -0.05);
+		expect(butts.ok ? '' : butts.because).toContain('meet');
+		expect(ringGapInMm(-0.1, 0)).toMatchObject({ ok: false });
+		expect(ringGapInMm(0.3, NaN)).toMatchObject({ ok: false });
 	});
 });

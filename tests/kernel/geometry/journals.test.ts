@@ -22,6 +22,24 @@ describe('a grid of diameters', () => {
 			})
 		);
 	});
+	it('stays as round and as straight when every reading is larger by the same', () => {
+		fc.assert(
+			fc.property(grid, fc.integer({ min: -5000, max: 5000 }), (rows, more) => {
+				const moved = rows.map((row) => row.map((one) => one + more / 1000));
+				expect(value(outOfRoundMm(moved))).toBeCloseTo(value(outOfRoundMm(rows)), 5);
+				expect(value(taperMm(moved))).toBeCloseTo(value(taperMm(rows)), 5);
+			})
+		);
+	});
+	it('is the same in inches', () => {
+		fc.assert(
+			fc.property(grid, (rows) => {
+				const inches = rows.map((row) => row.map((one) => one / 25.4));
+				expect(value(outOfRoundMm(inches)) * 25.4).toBeCloseTo(value(outOfRoundMm(rows)), 4);
+				expect(value(taperMm(inches)) * 25.4).toBeCloseTo(value(taperMm(rows)), 4);
+			})
+		);
+	});
 	it('never finds more than the whole spread', () => {
 		fc.assert(
 			fc.property(grid, (rows) => {

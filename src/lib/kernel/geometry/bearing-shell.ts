@@ -1,6 +1,9 @@
 import { cannot, computed, type Outcome } from '../outcome';
 import { tidy } from './diameter-grid';
 
+/** Of one half shell, and the press in diameter that both give; below zero the shell is loose. */
+export type Crush = { crushMm: number; interferenceMm: number };
+
 /**
  * Crush: how far each half shell stands proud of its half of the housing, and the press that both give.
  *
@@ -10,10 +13,7 @@ import { tidy } from './diameter-grid';
  * Source: geometry of a half circle; crush as US Army TM 5-3805-255-14, bearing fitting, describes it.
  * @example crushOf(67.574, 43) // crush 0.030 mm
  */
-export function crushOf(
-	peripheralMm: number,
-	housingMm: number
-): Outcome<{ crushMm: number; interferenceMm: number }> {
+export function crushOf(peripheralMm: number, housingMm: number): Outcome<Crush> {
 	if (
 		!(peripheralMm > 0) ||
 		!(housingMm > 0) ||
@@ -24,6 +24,21 @@ export function crushOf(
 	if (Math.abs(crush) > housingMm / 20)
 		return cannot('that is no half shell of this housing: look at both figures');
 	return computed({ crushMm: tidy(crush), interferenceMm: tidy((2 * crush) / Math.PI) });
+}
+
+/**
+ * Crush from the gap at the split: both bolts tightened through every stage, then one of them
+ * loosened until the joint opens.
+ *
+ * Formula: crush of one half = g / 2; interference in diameter = g / π.
+ * @param gapMm g: gap at the loosened joint, mm, zero to 2
+ * @returns mm
+ * Source: method of the trade, common practice; the press follows from the circumference.
+ * @example crushFromGap(0.06) // crush 0.030 mm, interference 0.019 mm
+ */
+export function crushFromGap(gapMm: number): Outcome<Crush> {
+	if (!(gapMm >= 0) || gapMm > 2) return cannot('a gap at the split is zero to 2 mm');
+	return computed({ crushMm: tidy(gapMm / 2), interferenceMm: tidy(gapMm / Math.PI) });
 }
 
 /**

@@ -31,6 +31,24 @@ export function ringGapGrowthMm(widerMm: number): Outcome<number> {
 	return computed(tidy(Math.PI * widerMm));
 }
 
+/**
+ * How wide a ring's gap stands where its bore is larger.
+ *
+ * Formula: g = g0 + π · ΔD.
+ * @param gapMm g0: the gap where it was measured, mm, zero or more
+ * @param widerMm ΔD: how much larger the bore is than there, mm, below zero where it is smaller
+ * @returns mm; "cannot" where the ring's ends would meet
+ * Source: circumference; the manuals round π to 3 (reference entries G09 and G10).
+ * @example ringGapInMm(0.3, 0.05) // 0.457
+ */
+export function ringGapInMm(gapMm: number, widerMm: number): Outcome<number> {
+	if (!(gapMm >= 0) || gapMm > 100) return cannot('a gap is a number, zero or more');
+	const growth = ringGapGrowthMm(widerMm);
+	if (!growth.ok) return growth;
+	const there = tidy(gapMm + growth.value);
+	return there > 0 ? computed(there) : cannot('the ends of the ring would meet in so small a bore');
+}
+
 export type Deck = { heightMm: number; rockMm: number };
 
 /**
