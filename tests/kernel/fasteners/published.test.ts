@@ -1,17 +1,13 @@
 import { describe, expect, it } from 'vitest';
 import { assemblyPreloadN } from '$lib/kernel/fasteners/assembly-preload';
-import { screwTorqueNm, torqueByFriction } from '$lib/kernel/fasteners/friction';
-import { torqueForPreloadNm } from '$lib/kernel/fasteners/preload';
-import { boltLoads, loadsOf } from '$lib/kernel/fasteners/proof-load';
-import { sixLobeAcrossMm, sixLobeSockets, threadsOfSixLobe } from '$lib/kernel/fasteners/six-lobe';
+import { torqueByFriction } from '$lib/kernel/fasteners/friction';
+import { screwTorqueNm } from '$lib/kernel/fasteners/screw-torque';
+import { clampLoadN, torqueForPreloadNm } from '$lib/kernel/fasteners/preload';
+import { boltLoads, gradeLoads, loadsOf } from '$lib/kernel/fasteners/proof-load';
 import { stagePlan } from '$lib/kernel/fasteners/stage-plan';
 import { stretchMm } from '$lib/kernel/fasteners/stiffness';
-import {
-	classStrength,
-	gradeStrength,
-	type Grade,
-	type PropertyClass
-} from '$lib/kernel/fasteners/strength';
+import type { Grade, PropertyClass } from '$lib/kernel/fasteners/strength';
+import { seriesOf, unifiedThreads } from '$lib/kernel/fasteners/standard-pitches';
 import { stressAreaIn2, stressAreaMm2 } from '$lib/kernel/fasteners/stress-area';
 import type { Outcome } from '$lib/kernel/outcome';
 import { convert } from '$lib/kernel/quantity/units';
@@ -57,22 +53,26 @@ function threadOrLoad(entry: Worked): number {
 		return (kind === 'PL' ? loads.proofN : loads.tensileN) / 1000;
 	}
 	const [, name = '', threads = '', of429 = ''] = /^UPL-([\d_]+)-(\d+)-(\d)$/.exec(entry.id) ?? [];
-	const diameterIn = inch(name);
-	// The published areas are rounded to four places before they are multiplied.
-	const area = Number(value(stressAreaIn2(diameterIn, Number(threads))).toFixed(4));
-	const strength = value(gradeStrength(of429 as Grade, diameterIn));
-	return lbf(value(loadsOf(mm2(area), strength)).proofN);
+	return lbf(value(gradeLoads(inch(name), Number(threads), of429 as Grade)).proofN);
 }
 
 describe('threads and what they bear, published tables', () => {
-	it.each(referenceOf<Worked>('threads-and-strength.json'))('%s', (_, entry) => {
+	const entries = referenceOf<Worked>('threads-and-strength.json');
+	it.each(entries)('%s', (_, entry) => {
 		expectWithin(threadOrLoad(entry), entry);
+	});
+	it.each(entries.filter(([, { id }]) => id.startsWith('TH')))('%s: its series', (_, entry) => {
+		const series = seriesOf(given(entry, 'd'), given(entry, 'P'));
+		expect(series).toBe(entry.quantity.endsWith('fine') ? 'fine' : 'coarse');
+	});
+	it.each(entries.filter(([, { id }]) => id.startsWith('UN')))('%s: its series', (_, entry) => {
+		const threads = unifiedThreads(given(entry, 'd'));
+		expect([threads?.coarse, threads?.fine]).toContain(given(entry, 'n'));
 	});
 });
 
-/** Clamp load at a share of a stress, by the book's area. */
-const share = (part: number, areaIn2: number, psi: number) =>
-	part *
+/** What an area bears at a stress, by the book's own figures. */
+const bears = (areaIn2: number, psi: number) =>
 	value(loadsOf(mm2(areaIn2), { proofMPa: mpa(psi), yieldMPa: mpa(psi), tensileMPa: mpa(psi) }))
 		.proofN;
 
@@ -112,8 +112,7 @@ function torqueOrPreload(entry: Worked): number {
 	if (id === 'TN5')
 		return value(stretchMm(of('F'), [{ lengthMm: of('L'), areaMm2: of('A') }], of('E')));
 	if (id === 'TN9') {
-		const loads = value(boltLoads(10, 1.5, '10.9'));
-		return (0.75 * loads.proofN) / 1000;
+		return value(clampLoadN(0.75, value(boltLoads(10, 1.5, '10.9')).proofN)) / 1000;
 	}
 	if (id === 'TN6') {
 		const angles = ['a1', 'a2', 'a3', 'a4'].map((name) => ({ angleDeg: of(name) }));
@@ -132,8 +131,8 @@ function torqueOrPreload(entry: Worked): number {
 			0
 		);
 	}
-	if (!has('K')) return lbf(share(0.75, of('At'), of('Sp')));
-	const load = has('F') ? newtons(of('F')) : share(1, of('At'), of('s'));
+	if (!has('K')) return lbf(value(clampLoadN(0.75, bears(of('At'), of('Sp')))));
+	const load = has('F') ? newtons(of('F')) : bears(of('At'), of('s'));
 	const torque = value(torqueForPreloadNm(load, of('K'), of('D') * 25.4));
 	return entry.unit === 'lbf.ft' ? lbfFt(torque) : lbfIn(torque);
 }
@@ -141,50 +140,5 @@ function torqueOrPreload(entry: Worked): number {
 describe('torque and preload, published values', () => {
 	it.each(referenceOf<Worked>('torque-and-preload.json'))('%s', (_, entry) => {
 		expectWithin(torqueOrPreload(entry), entry);
-	});
-});
-
-describe('external six-lobe sockets, published sizes', () => {
-	it.each(referenceOf<Worked>('six-lobe-sockets.json'))('%s', (_, entry) => {
-		const size = sixLobeAcrossMm(entry.id.replace('ES', 'E'));
-		expectWithin(size ?? NaN, entry);
-		// The inch column is cut to two places: it agrees within a quarter of a millimetre.
-		expect(Math.abs((size ?? NaN) - given(entry, 'x') * 25.4)).toBeLessThan(0.25);
-	});
-	it('are found from the thread and back, and none is made up', () => {
-		for (const thread of [5, 6, 8, 10, 12, 14, 16])
-			for (const socket of sixLobeSockets(thread))
-				expect(threadsOfSixLobe(socket)).toContain(thread);
-		expect(sixLobeSockets(9)).toEqual([]);
-		expect(threadsOfSixLobe('E99')).toEqual([]);
-		expect(sixLobeAcrossMm('E99')).toBeUndefined();
-	});
-});
-
-describe('strengths of classes and grades, published', () => {
-	// Source: ISO 898-1:2013, table 3, seen in two supplier copies (references PC-4.6 to PC-12.9).
-	it.each([
-		['4.6', 10, 225, 240, 400],
-		['5.8', 10, 380, 420, 520],
-		['8.8', 16, 580, 640, 800],
-		['8.8', 18, 600, 660, 830],
-		['10.9', 10, 830, 940, 1040],
-		['12.9', 10, 970, 1100, 1220]
-	] as const)('PC-%s at M%s', (name, diameter, proofMPa, yieldMPa, tensileMPa) => {
-		expect(classStrength(name, diameter)).toEqual({ proofMPa, yieldMPa, tensileMPa });
-	});
-	// Source: SAE J429, strengths by size (references J429-1 to J429-8).
-	it.each([
-		['1', 0.5, 33, 36, 60],
-		['2', 0.75, 55, 57, 74],
-		['2', 0.875, 33, 36, 60],
-		['5', 1, 85, 92, 120],
-		['5', 1.25, 74, 81, 105],
-		['8', 0.5, 120, 130, 150]
-	] as const)('J429-%s at %s in', (grade, diameter, proof, least, tensile) => {
-		const found = value(gradeStrength(grade, diameter));
-		expect(convert('pressure', found.proofMPa, 'MPa', 'psi')).toBeCloseTo(proof * 1000, 6);
-		expect(convert('pressure', found.yieldMPa, 'MPa', 'psi')).toBeCloseTo(least * 1000, 6);
-		expect(convert('pressure', found.tensileMPa, 'MPa', 'psi')).toBeCloseTo(tensile * 1000, 6);
 	});
 });

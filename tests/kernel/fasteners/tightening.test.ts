@@ -1,22 +1,16 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { assemblyPreloadN } from '$lib/kernel/fasteners/assembly-preload';
-import {
-	preloadByFrictionN,
-	screwTorqueNm,
-	torqueByFriction
-} from '$lib/kernel/fasteners/friction';
+import { preloadByFrictionN, torqueByFriction } from '$lib/kernel/fasteners/friction';
+import { sleeveStiffnessNPerMm } from '$lib/kernel/fasteners/joint-stiffness';
 import { boltLoads } from '$lib/kernel/fasteners/proof-load';
+import { screwTorqueNm } from '$lib/kernel/fasteners/screw-torque';
 import { stagePlan, type Stage } from '$lib/kernel/fasteners/stage-plan';
-import {
-	boltStiffnessNPerMm,
-	inSeriesNPerMm,
-	sleeveStiffnessNPerMm,
-	stretchMm
-} from '$lib/kernel/fasteners/stiffness';
+import { boltStiffnessNPerMm, inSeriesNPerMm, stretchMm } from '$lib/kernel/fasteners/stiffness';
 import { gradeStrength } from '$lib/kernel/fasteners/strength';
 import { stressAreaIn2, stressAreaMm2 } from '$lib/kernel/fasteners/stress-area';
-import { coarsePitchMm, threadOf } from '$lib/kernel/fasteners/thread';
+import { coarsePitchMm } from '$lib/kernel/fasteners/standard-pitches';
+import { threadOf } from '$lib/kernel/fasteners/thread';
 import { angleForPreloadDeg, tightenByAngle } from '$lib/kernel/fasteners/torque-angle';
 import type { Outcome } from '$lib/kernel/outcome';
 

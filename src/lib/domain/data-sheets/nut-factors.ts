@@ -1,24 +1,24 @@
+import {
+	nutFactors,
+	type Lubrication,
+	type NutFactorRange
+} from '$lib/kernel/fasteners/nut-factor';
 import type { Fastener } from './schema';
 
-type Range = { least: number; most: number };
-
-/**
- * Nut factors that bracket a lubrication, by its words; the first that fits.
- * Source: typical values of textbooks and supplier tables (references K-a to K-k); they differ
- * between sources, so each is a range.
- */
-const byWords: readonly [RegExp, Range][] = [
-	[/anti-?seize|molybd|paste/i, { least: 0.12, most: 0.16 }],
-	[/wax/i, { least: 0.1, most: 0.14 }],
-	[/oil|grease/i, { least: 0.15, most: 0.2 }],
-	[/zinc/i, { least: 0.2, most: 0.25 }]
+/** What a sheet's words for a lubrication mean; the first that fits. */
+const byWords: readonly [RegExp, Lubrication][] = [
+	[/anti-?seize|molybd|paste/i, 'anti-seize'],
+	[/wax/i, 'waxed'],
+	[/oil|grease/i, 'oiled'],
+	[/zinc/i, 'zinc']
 ];
-const dry: Range = { least: 0.18, most: 0.25 };
+
+/** A fastener's lubrication by its words; dry where none of them is known. */
+export function lubricationOf({ lubrication }: Pick<Fastener, 'lubrication'>): Lubrication {
+	return byWords.find(([shape]) => shape.test(lubrication))?.[1] ?? 'dry';
+}
 
 /** What a fastener's nut factor may be: its own where the sheet gives it, else by its lubrication. */
-export function nutFactorOf({
-	nutFactor,
-	lubrication
-}: Pick<Fastener, 'nutFactor' | 'lubrication'>): Range {
-	return nutFactor ?? byWords.find(([shape]) => shape.test(lubrication))?.[1] ?? dry;
+export function nutFactorOf(fastener: Pick<Fastener, 'nutFactor' | 'lubrication'>): NutFactorRange {
+	return fastener.nutFactor ?? nutFactors[lubricationOf(fastener)];
 }

@@ -36,3 +36,33 @@ export function torqueForPreloadNm(
 		return cannot('preload, nut factor and diameter are above zero');
 	return computedNumber(nutFactor * (diameterMm / 1000) * preload);
 }
+
+/**
+ * Preload that uses a share of what a bolt may bear.
+ *
+ * Formula: F = s · Fp.
+ * @param share s, above 0 up to 1: 0.75 where the joint is taken apart again, 0.9 where it stays
+ * @param proofN proof load Fp, N, above zero
+ * @returns N
+ * Source: textbook rule (references TP10 to TP13, TP40, TN9).
+ * @example clampLoadN(0.75, 48_140) // 36 105
+ */
+export function clampLoadN(share: number, proofN: number): Outcome<number> {
+	if (!(share > 0) || share > 1) return cannot('a share lies above 0 and up to 1');
+	if (!(proofN > 0)) return cannot('a proof load is a number above zero');
+	return computedNumber(share * proofN);
+}
+
+/**
+ * What share of a load that a bolt bears a preload uses up: the same rule turned round.
+ *
+ * Formula: s = F / Fp.
+ * @param preload F, N, zero or more @param bearsN proof, yield or tensile load, N, above zero
+ * @returns a share: above 1 it bears no more
+ * Source: as `clampLoadN`.
+ * @example loadShare(36_105, 48_140) // 0.75
+ */
+export function loadShare(preload: number, bearsN: number): Outcome<number> {
+	if (!(preload >= 0) || !(bearsN > 0)) return cannot('loads are numbers above zero');
+	return computedNumber(preload / bearsN);
+}

@@ -1,7 +1,14 @@
 import { computedNumber } from '../computed-number';
 import { cannot, computed, type Outcome } from '../outcome';
-import { classStrength, type PropertyClass, type Strength } from './strength';
-import { stressAreaMm2 } from './stress-area';
+import { tabledAreaMm2, type BoltThread } from './bolt-thread';
+import {
+	classStrength,
+	strengthOf,
+	type Grade,
+	type PropertyClass,
+	type Strength,
+	type StrengthName
+} from './strength';
 
 export type { PropertyClass };
 
@@ -52,9 +59,37 @@ export function boltLoads(
 	pitchMm: number,
 	propertyClass: PropertyClass
 ): Outcome<Loads> {
-	const area = stressAreaMm2(diameterMm, pitchMm);
+	return threadLoads({ diameterMm, pitchMm }, propertyClass);
+}
+
+/**
+ * Proof, yield and least tensile load of a unified inch bolt.
+ *
+ * Formula: F = As · S, with As to four places of a square inch and S of the grade in its size.
+ * @param diameterIn inches, 1/4 to 1 1/2 @param threadsPerInch n
+ * @returns area in mm², loads in N
+ * Source: SAE J429, stresses and loads.
+ * @example gradeLoads(0.5, 13, '5') // proof 53 650 N (12 062 lbf)
+ */
+export function gradeLoads(
+	diameterIn: number,
+	threadsPerInch: number,
+	grade: Grade
+): Outcome<Loads> {
+	return threadLoads({ diameterMm: diameterIn * 25.4, threadsPerInch }, `SAE ${grade}`);
+}
+
+/**
+ * Loads of either kind of thread in any class or grade.
+ *
+ * @returns area in mm², loads in N
+ * @example threadLoads({ diameterMm: 10, pitchMm: 1.25 }, '10.9') // proof 50 796 N
+ */
+export function threadLoads(thread: BoltThread, strength: StrengthName): Outcome<Loads> {
+	const area = tabledAreaMm2(thread);
 	if (!area.ok) return area;
-	return loadsOf(Number(area.value.toPrecision(3)), classStrength(propertyClass, diameterMm));
+	const stresses = strengthOf(strength, thread.diameterMm);
+	return stresses.ok ? loadsOf(area.value, stresses.value) : stresses;
 }
 
 /**

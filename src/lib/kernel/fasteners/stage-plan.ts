@@ -1,36 +1,10 @@
 import { cannot, computed, type Outcome } from '../outcome';
+import { afterAngle } from './after-angle';
+import type { Plan, PlannedStage, StagePlan } from './plan';
 import { preloadN } from './preload';
-import { boltLoads, type Loads, type PropertyClass } from './proof-load';
-import { boltStiffnessNPerMm } from './stiffness';
-import { tightenByAngle } from './torque-angle';
+import { boltLoads } from './proof-load';
 
-export type Stage = { torqueNm: number } | { angleDeg: number };
-export type Plan = {
-	diameterMm: number;
-	pitchMm: number;
-	propertyClass: PropertyClass;
-	/** K that brackets the lubrication: least gives the hardest pull. */
-	nutFactor: { least: number; most: number };
-	/** Head to first loaded thread, mm; wanted where a stage is an angle. */
-	gripMm?: number;
-	/** Clamped parts against the bolt; stiffer parts reach yield sooner. */
-	jointPerBolt?: number;
-	stages: readonly Stage[];
-};
-export type PlannedStage = {
-	stage: Stage;
-	/** Preload after it, N: between the slipperiest and the driest the lubrication may be. */
-	leastN: number;
-	mostN: number;
-	/** Whether the slipperiest bolt is past yield after it. */
-	beyondYield: boolean;
-	/** Lasting stretch of that bolt, as a share of its grip. */
-	lastingShare: number;
-};
-export type StagePlan = { loads: Loads; stages: PlannedStage[] };
-
-/** Clamped iron or aluminium around a long bolt: common practice, no source; two to five are met. */
-const usualJointPerBolt = 3;
+export type { Plan, PlannedStage, Stage, StagePlan } from './plan';
 
 /**
  * What a tightening plan does to a bolt, stage by stage.
@@ -38,7 +12,8 @@ const usualJointPerBolt = 3;
  * Formula: torque stage F = T / (K · d); angle stage F = Fs + k · P · α/360° up to yield.
  * @param plan sizes in mm, torques in N·m, angles in degrees; see the type
  * @returns the bolt's loads in N and each stage's least and most preload; "cannot" where an angle
- *   comes first, a torque falls, or an angle has no grip length to work on
+ *   comes first, a torque falls, an angle has no grip length to work on, or a bolt that is not
+ *   yield-tightened is taken past its proof load
  * Source: T = K·D·F (FAA and NASA practice); VDI 2230 part 1, angle controlled tightening.
  * @example stagePlan({ diameterMm: 10, pitchMm: 1.25, propertyClass: '10.9',
  *   nutFactor: { least: 0.15, most: 0.2 }, stages: [{ torqueNm: 25 }, { torqueNm: 50 }] })
@@ -69,6 +44,7 @@ export function stagePlan(plan: Plan): Outcome<StagePlan> {
 			stages.push({
 				stage,
 				...snug,
+				beyondProof: hard.value > loads.value.proofN,
 				beyondYield: hard.value > loads.value.yieldN,
 				lastingShare: 0
 			});
@@ -80,35 +56,8 @@ export function stagePlan(plan: Plan): Outcome<StagePlan> {
 		if (!turned.ok) return turned;
 		stages.push({ stage, ...turned.value });
 	}
+	const past = stages.findIndex((one) => one.beyondProof);
+	if (plan.yieldTightened === false && past >= 0)
+		return cannot(`stage ${past + 1} takes the bolt past its proof load`);
 	return computed({ loads: loads.value, stages });
-}
-
-function afterAngle(
-	plan: Plan,
-	loads: Loads,
-	snug: { leastN: number; mostN: number },
-	angleDeg: number
-): Outcome<Omit<PlannedStage, 'stage'>> {
-	const { gripMm, pitchMm, jointPerBolt = usualJointPerBolt } = plan;
-	if (!gripMm || !(gripMm > 0)) return cannot('an angle needs the length that is stretched');
-	const bolt = boltStiffnessNPerMm([{ lengthMm: gripMm, areaMm2: loads.areaMm2 }]);
-	if (!bolt.ok) return bolt;
-	const turn = (snugN: number) =>
-		tightenByAngle({
-			snugN,
-			angleDeg,
-			pitchMm,
-			boltNPerMm: bolt.value,
-			jointNPerMm: bolt.value * jointPerBolt,
-			yieldN: loads.yieldN
-		});
-	const [soft, hard] = [turn(snug.leastN), turn(snug.mostN)];
-	if (!soft.ok) return soft;
-	if (!hard.ok) return hard;
-	return computed({
-		leastN: soft.value.preloadN,
-		mostN: hard.value.preloadN,
-		beyondYield: hard.value.beyondYield,
-		lastingShare: hard.value.lastingMm / gripMm
-	});
 }

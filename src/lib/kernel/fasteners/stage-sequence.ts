@@ -1,5 +1,6 @@
+import { computedNumber } from '../computed-number';
 import { cannot, computed, type Outcome } from '../outcome';
-import type { Stage } from './stage-plan';
+import type { Stage } from './plan';
 
 export type SequenceStep = { stage: number; bolt: string };
 
@@ -38,4 +39,20 @@ export function thirdsNm(torqueNm: number): Outcome<number[]> {
 /** All the angle that a plan turns after its last torque, degrees. */
 export function turnedDeg(stages: readonly Stage[]): number {
 	return stages.reduce((sum, one) => sum + ('angleDeg' in one ? one.angleDeg : 0), 0);
+}
+
+/**
+ * What is still to be turned of a plan's angles.
+ *
+ * Formula: left = Σ angle stages − turned.
+ * @param stages of one plan, in their order @param turned since the last torque, degrees
+ * @returns degrees; "cannot" where more was turned than the plan has
+ * Source: by definition of the stages.
+ * @example leftToTurnDeg([{ torqueNm: 30 }, { angleDeg: 90 }, { angleDeg: 90 }], 105) // 75
+ */
+export function leftToTurnDeg(stages: readonly Stage[], turned: number): Outcome<number> {
+	if (!(turned >= 0)) return cannot('an angle is a number, zero or more');
+	const all = turnedDeg(stages);
+	if (turned > all) return cannot(`the plan turns ${all}° in all, and more was turned`);
+	return computedNumber(all - turned);
 }

@@ -48,25 +48,23 @@ export function boltStiffnessNPerMm(
 }
 
 /**
- * Stiffness of clamped parts taken as a sleeve around the bolt.
+ * Load that a measured stretch stands for: the same rule turned round. It holds below yield alone.
  *
- * Formula: k = E · π/4 · (D² − dh²) / L.
- * @param outerMm D, mm: the width that the clamping force spreads to @param holeMm dh, mm
- * @param lengthMm L, mm @param modulusMPa E of the parts, N/mm²
- * @returns N/mm
- * Source: Hooke's law for a sleeve, the plainest form of the clamped solid in VDI 2230 part 1.
- * @example sleeveStiffnessNPerMm(20, 11, 80, 70_000) // 191 700
+ * Formula: F = ΔL · E / Σ (Li / Ai).
+ * @param stretch ΔL, mm, zero or more: length tightened less length free
+ * @param sections as `stretchMm` @param modulusMPa E, N/mm²
+ * @returns N
+ * Source: as `stretchMm`.
+ * @example preloadOfStretchN(0.269, [{ lengthMm: 80, areaMm2: 58 }]) // 39 980
  */
-export function sleeveStiffnessNPerMm(
-	outerMm: number,
-	holeMm: number,
-	lengthMm: number,
-	modulusMPa: number
+export function preloadOfStretchN(
+	stretch: number,
+	sections: readonly Section[],
+	modulusMPa = steelModulusMPa
 ): Outcome<number> {
-	if (!(holeMm > 0) || !(outerMm > holeMm)) return cannot('the sleeve is wider than its hole');
-	if (!(lengthMm > 0) || !(modulusMPa > 0))
-		return cannot('length and modulus are numbers above zero');
-	return computedNumber((modulusMPa * (Math.PI / 4) * (outerMm ** 2 - holeMm ** 2)) / lengthMm);
+	if (!(stretch >= 0)) return cannot('a stretch is a length, zero or more');
+	const stiffness = boltStiffnessNPerMm(sections, modulusMPa);
+	return stiffness.ok ? computedNumber(stretch * stiffness.value) : stiffness;
 }
 
 /**

@@ -1,7 +1,9 @@
 import { cannot, computed, type Outcome } from '../outcome';
 
 export type PropertyClass = '4.6' | '4.8' | '5.6' | '5.8' | '6.8' | '8.8' | '9.8' | '10.9' | '12.9';
-export type Grade = '1' | '2' | '5' | '8';
+export type Grade = '1' | '2' | '5' | '7' | '8';
+/** A class or a grade, as a head is marked or a sheet names it. */
+export type StrengthName = PropertyClass | `SAE ${Grade}`;
 
 /** Least values, N/mm². Yield is the lower yield stress or the 0.2 % proof strength, whichever the class states. */
 export type Strength = { proofMPa: number; yieldMPa: number; tensileMPa: number };
@@ -56,6 +58,7 @@ const grades: Readonly<Record<Grade, readonly Sized[]>> = {
 		{ uptoIn: 1, ksi: [85, 92, 120] },
 		{ uptoIn: 1.5, ksi: [74, 81, 105] }
 	],
+	'7': [{ uptoIn: 1.5, ksi: [105, 115, 133] }],
 	'8': [{ uptoIn: 1.5, ksi: [120, 130, 150] }]
 };
 
@@ -64,7 +67,7 @@ const grades: Readonly<Record<Grade, readonly Sized[]>> = {
  *
  * @param diameterIn nominal diameter, 1/4 to 1 1/2 inches: grades are weaker in large sizes
  * @returns proof stress, yield and tensile strength, N/mm²; "cannot" outside the sizes of the grade
- * Source: SAE J429, mechanical requirements.
+ * Source: SAE J429, mechanical requirements; grade 7, of older editions, as textbooks reprint it.
  * @example gradeStrength('5', 0.5) // proof 586 N/mm² (85 ksi)
  */
 export function gradeStrength(grade: Grade, diameterIn: number): Outcome<Strength> {
@@ -73,4 +76,23 @@ export function gradeStrength(grade: Grade, diameterIn: number): Outcome<Strengt
 	if (!found) return cannot('the grades end at 1 1/2 inches');
 	const [proof, least, tensile] = found.ksi;
 	return computed(of(proof * ksi, least * ksi, tensile * ksi));
+}
+
+export const strengthNames: readonly StrengthName[] = [
+	...propertyClasses,
+	...(Object.keys(grades) as Grade[]).map((grade): StrengthName => `SAE ${grade}`)
+];
+
+/**
+ * Strength of a class or a grade.
+ *
+ * @param name such as '10.9' or 'SAE 5' @param diameterMm nominal diameter, mm
+ * @returns N/mm²; "cannot" outside the sizes of a grade
+ * @example strengthOf('SAE 5', 12.7) // proof 586 N/mm²
+ */
+export function strengthOf(name: StrengthName, diameterMm: number): Outcome<Strength> {
+	if (!(diameterMm > 0)) return cannot('a diameter is a number above zero');
+	if (!name.startsWith('SAE ')) return computed(classStrength(name as PropertyClass, diameterMm));
+	// Inches that came through millimetres carry binary dust: 1/4 must stay 1/4.
+	return gradeStrength(name.slice(4) as Grade, Number((diameterMm / 25.4).toFixed(6)));
 }

@@ -41,26 +41,3 @@ export function threadOf(diameterMm: number, pitchMm: number): Outcome<Thread> {
 		leadAngleDeg: (Math.atan(pitchMm / (Math.PI * pitchDiameterMm)) * 180) / Math.PI
 	});
 }
-
-/** Coarse pitches by nominal diameter, mm. Source: ISO 261:1998, table 2, from memory. */
-const coarse: Readonly<Record<number, number>> = {
-	3: 0.5,
-	4: 0.7,
-	5: 0.8,
-	6: 1,
-	7: 1,
-	8: 1.25,
-	10: 1.5,
-	12: 1.75,
-	14: 2,
-	16: 2,
-	18: 2.5,
-	20: 2.5,
-	22: 2.5,
-	24: 3
-};
-
-/** The coarse pitch of a metric size, mm; undefined for a size that is none of the series. */
-export function coarsePitchMm(diameterMm: number): number | undefined {
-	return coarse[diameterMm];
-}

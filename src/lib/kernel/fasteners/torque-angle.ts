@@ -14,6 +14,8 @@ export type TorqueAngle = {
 	yieldN: number;
 	/** Rise of the load beyond yield as a share of the elastic rise: 0 flat, below 1. */
 	hardening?: number;
+	/** Load at which it parts, N: with a hardening the line ends there. */
+	tensileN?: number;
 };
 export type Tightened = {
 	preloadN: number;
@@ -57,6 +59,8 @@ export function tightenByAngle(asked: TorqueAngle): Outcome<Tightened> {
 	const beyondMm = Math.max(0, turnedMm - toYieldMm);
 	const preload = beyondMm > 0 ? yieldN + hardening * k * beyondMm : snugN + k * turnedMm;
 	const elasticMm = preload / boltNPerMm;
+	if (asked.tensileN !== undefined && preload > asked.tensileN)
+		return cannot('the bolt parts before that angle: its tensile load is passed');
 	if (![preload, angleAtYieldDeg, beyondMm, elasticMm].every(Number.isFinite))
 		return cannot('the figures give no number: look for a slip in one of them');
 	const end = { angleDeg, loadN: preload };
@@ -83,7 +87,7 @@ export function tightenByAngle(asked: TorqueAngle): Outcome<Tightened> {
  */
 export function angleForPreloadDeg(
 	wantedN: number,
-	asked: Omit<TorqueAngle, 'angleDeg' | 'hardening'>
+	asked: Omit<TorqueAngle, 'angleDeg' | 'hardening' | 'tensileN'>
 ): Outcome<number> {
 	if (!(wantedN >= asked.snugN)) return cannot('the wanted load lies below the snug load');
 	if (wantedN > asked.yieldN)

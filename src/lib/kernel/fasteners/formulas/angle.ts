@@ -1,15 +1,9 @@
 import { computed } from '../../outcome';
 import type { Formula } from '../../formula';
 import { stagePlan } from '../stage-plan';
-import {
-	boltStiffnessNPerMm,
-	inSeriesNPerMm,
-	sleeveStiffnessNPerMm,
-	stretchMm
-} from '../stiffness';
+import { leftToTurnDeg } from '../stage-sequence';
 import { angleForPreloadDeg, tightenByAngle } from '../torque-angle';
 
-const shank = [{ lengthMm: 80, areaMm2: 58 }];
 const joint = {
 	snugN: 15_000,
 	pitchMm: 1.25,
@@ -20,54 +14,6 @@ const joint = {
 
 /** Bolts that are turned on after a snug torque. */
 export const angleFormulas: readonly Formula[] = [
-	{
-		id: 'fasteners/stretch',
-		works: stretchMm,
-		formula: 'ΔL = F / E · Σ (Li / Ai)',
-		source: "Hooke's law for bars in series",
-		example: {
-			says: '40 kN on 80 mm of 58 mm² steel, mm',
-			gives: () => stretchMm(40_000, shank),
-			wanted: 0.269,
-			within: 0.0005
-		}
-	},
-	{
-		id: 'fasteners/bolt-stiffness',
-		works: boltStiffnessNPerMm,
-		formula: 'k = E / Σ (Li / Ai)',
-		source: "Hooke's law for bars in series; VDI 2230 part 1, bolt resilience",
-		example: {
-			says: 'the same bolt, N/mm',
-			gives: () => boltStiffnessNPerMm(shank),
-			wanted: 148_600,
-			within: 50
-		}
-	},
-	{
-		id: 'fasteners/sleeve-stiffness',
-		works: sleeveStiffnessNPerMm,
-		formula: 'k = E · π/4 · (D² − dh²) / L',
-		source: "Hooke's law for a sleeve; VDI 2230 part 1, clamped parts",
-		example: {
-			says: 'aluminium, 20 mm wide, hole 11 mm, 80 mm long, N/mm',
-			gives: () => sleeveStiffnessNPerMm(20, 11, 80, 70_000),
-			wanted: 191_700,
-			within: 100
-		}
-	},
-	{
-		id: 'fasteners/in-series',
-		works: inSeriesNPerMm,
-		formula: 'k = a · b / (a + b)',
-		source: 'springs in series',
-		example: {
-			says: '150 and 450 kN/mm, N/mm',
-			gives: () => inSeriesNPerMm(150_000, 450_000),
-			wanted: 112_500,
-			within: 0.5
-		}
-	},
 	{
 		id: 'fasteners/torque-angle',
 		works: tightenByAngle,
@@ -115,6 +61,18 @@ export const angleFormulas: readonly Formula[] = [
 			},
 			wanted: 33_333,
 			within: 0.5
+		}
+	},
+	{
+		id: 'fasteners/left-to-turn',
+		works: leftToTurnDeg,
+		formula: 'left = Σ angle stages − turned',
+		source: 'by definition of the stages',
+		example: {
+			says: 'twice 90°, 105° turned, degrees',
+			gives: () => leftToTurnDeg([{ torqueNm: 30 }, { angleDeg: 90 }, { angleDeg: 90 }], 105),
+			wanted: 75,
+			within: 1e-9
 		}
 	}
 ];

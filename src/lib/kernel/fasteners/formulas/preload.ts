@@ -1,8 +1,10 @@
 import { computed } from '../../outcome';
 import type { Formula } from '../../formula';
-import { assemblyPreloadN } from '../assembly-preload';
-import { bearingMeanMm, preloadByFrictionN, screwTorqueNm, torqueByFriction } from '../friction';
-import { preloadN, torqueForPreloadNm } from '../preload';
+import { assemblyPreloadN, strengthWhileTurned } from '../assembly-preload';
+import { bearingMeanMm, preloadByFrictionN, torqueByFriction } from '../friction';
+import { middleNutFactor } from '../nut-factor';
+import { clampLoadN, loadShare, preloadN, torqueForPreloadNm } from '../preload';
+import { screwTorqueNm } from '../screw-torque';
 
 const vdi = 'VDI 2230 part 1, tightening torque';
 const joint = {
@@ -37,6 +39,43 @@ export const preloadFormulas: readonly Formula[] = [
 			gives: () => torqueForPreloadNm(30_000, 0.2, 10),
 			wanted: 60,
 			within: 0.005
+		}
+	},
+	{
+		id: 'fasteners/middle-nut-factor',
+		works: middleNutFactor,
+		formula: 'K = (least + most) / 2',
+		source: 'definition of the middle of a range',
+		example: {
+			says: 'oiled, 0.15 to 0.20',
+			gives: () => middleNutFactor({ least: 0.15, most: 0.2 }),
+			wanted: 0.175,
+			within: 1e-9
+		}
+	},
+	{
+		id: 'fasteners/clamp-load',
+		works: clampLoadN,
+		formula: 'F = s · Fp',
+		source:
+			'textbook rule: 75 % of proof load where a joint is taken apart again, 90 % where it stays',
+		example: {
+			says: '75 % of 48.14 kN, N',
+			gives: () => clampLoadN(0.75, 48_140),
+			wanted: 36_105,
+			within: 0.5
+		}
+	},
+	{
+		id: 'fasteners/load-share',
+		works: loadShare,
+		formula: 's = F / Fp',
+		source: 'the same rule turned round',
+		example: {
+			says: '36 105 N on a proof load of 48 140 N',
+			gives: () => loadShare(36_105, 48_140),
+			wanted: 0.75,
+			within: 1e-9
 		}
 	},
 	{
@@ -89,6 +128,18 @@ export const preloadFormulas: readonly Formula[] = [
 			gives: () => screwTorqueNm(46_400, joint),
 			wanted: 74.7,
 			within: 0.3
+		}
+	},
+	{
+		id: 'fasteners/strength-while-turned',
+		works: strengthWhileTurned,
+		formula: 'q = 1 / √(1 + 3 · (1.5 · d2/d0 · (P/(π · d2) + 1.155 µG))²)',
+		source: 'VDI 2230 part 1, reduced stress at assembly',
+		example: {
+			says: 'M10 × 1.25, friction 0.12',
+			gives: () => strengthWhileTurned(10, 1.25, 0.12),
+			wanted: 0.8973,
+			within: 0.00005
 		}
 	},
 	{

@@ -1,6 +1,6 @@
 import { computed } from '../../outcome';
 import type { Formula } from '../../formula';
-import { boltLoads, proofLoadN } from '../proof-load';
+import { boltLoads, gradeLoads, proofLoadN } from '../proof-load';
 import { stressAreaIn2, stressAreaMm2 } from '../stress-area';
 import { threadOf } from '../thread';
 import { travelMm } from '../turn';
@@ -72,6 +72,21 @@ export const threadFormulas: readonly Formula[] = [
 			},
 			wanted: 60_300,
 			within: 50
+		}
+	},
+	{
+		id: 'fasteners/grade-loads',
+		works: gradeLoads,
+		formula: 'F = As · S, S the proof, yield or tensile stress of the grade',
+		source: 'SAE J429, mechanical requirements',
+		example: {
+			says: 'proof load of 1/2-13, grade 5, N (12 062 lbf)',
+			gives: () => {
+				const loads = gradeLoads(0.5, 13, '5');
+				return loads.ok ? computed(loads.value.proofN) : loads;
+			},
+			wanted: 53_655,
+			within: 5
 		}
 	},
 	{
