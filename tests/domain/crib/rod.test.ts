@@ -10,7 +10,7 @@ describe('bend and twist of a rod', () => {
 		// 170.52 less half of 43.02 and 18.00
 		expect(figureOf(worked, 'length')).toBeCloseTo(140.01, 6);
 		expect(worked.lines.map((one) => one.words)).toContain('Twist in 100 mm, near side high');
-		expect(worked.working[0]?.formula).toBe('(0.030 − 0.000) / 120 · 100');
+		expect(worked.working[0]?.formula).toBe('|(0.030 − 0.000) / 120 · 100|');
 		// 0.01 · 100/120 · √2
 		expect(worked.rulings?.[0]?.expandedUncertainty).toBeCloseTo(0.01179, 5);
 	});

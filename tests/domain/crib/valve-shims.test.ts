@@ -11,7 +11,7 @@ describe('valve shims', () => {
 		const worked = workedOf(valveShims);
 		expect(figureOf(worked, 'bought')).toBe(0);
 		expect(worked.lines[0]).toMatchObject({ key: 'buy', text: 'nothing' });
-		for (const step of worked.working) {
+		for (const step of worked.working.slice(0, -1)) {
 			const [, least = '', most = ''] = /limits ([\d.]+) to ([\d.]+) mm/.exec(step.words) ?? [];
 			expect(step.value).toBeGreaterThanOrEqual(Number(least) - 1e-9);
 			expect(step.value).toBeLessThanOrEqual(Number(most) + 1e-9);

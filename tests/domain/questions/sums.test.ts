@@ -12,6 +12,13 @@ const figures = figuresOf(sheet);
 
 /** Every sum, asked of the demo's data sheet, and the largest answer that a bench could give. */
 const asked: [SumName, Record<string, unknown>, number][] = [
+	['at-20', { of: 'crankpin.diameter', material: 'steel' }, 40.02],
+	['corner-twist', { of: 'head.flatness' }, 0.1],
+	['rod-line', { ask: 'bend' }, 0.2],
+	['rod-line', { ask: 'twist', bigEnd: true }, 0.2],
+	['runout', { of: 'crankshaft.runout', ask: 'half' }, 0.05],
+	['runout', { of: 'crankshaft.runout', ask: 'eccentricity' }, 0.06],
+	['shims-to-buy', { lash: 'valve.inletLash' }, 3],
 	['called-within', { of: 'crankpin.diameter', purpose: 'build', edge: 'up-to' }, 39.996],
 	['called-within', { of: 'crankpin.diameter', purpose: 'run-again', edge: 'from' }, 39.98],
 	['displacement', { bore: 'cylinder.bore', stroke: 'crankshaft.stroke', cylinders: 3 }, 1200],

@@ -1,11 +1,16 @@
+import { at20 } from './at-20';
 import { calledWithin } from './called-within';
+import { cornerTwist } from './corner-twist';
 import { displacement } from './displacement';
 import { fitClearance } from './fit-clearance';
 import { oilClearance } from './oil-clearance';
 import { outOfRound } from './out-of-round';
 import { readingUncertainty } from './reading-uncertainty';
 import { ringGap } from './ring-gap';
+import { rodLine } from './rod-line';
+import { runout } from './runout';
 import { sheetValue } from './sheet-value';
+import { shimsToBuy } from './shims-to-buy';
 import { stageTurn } from './stage-turn';
 import type { AnySum } from './sum';
 import { taper } from './taper';
@@ -15,14 +20,19 @@ import { valveShim } from './valve-shim';
 import { wear } from './wear';
 
 export const sumNames = [
+	'at-20',
 	'called-within',
+	'corner-twist',
 	'displacement',
 	'fit-clearance',
 	'oil-clearance',
 	'out-of-round',
 	'reading-uncertainty',
 	'ring-gap',
+	'rod-line',
+	'runout',
 	'sheet-value',
+	'shims-to-buy',
 	'stage-turn',
 	'taper',
 	'tool-for-limits',
@@ -34,14 +44,19 @@ export type SumName = (typeof sumNames)[number];
 
 /** One line a sum. Each draws what could be read at a bench and has the kernel work it. */
 export const sums: Record<SumName, AnySum> = {
+	'at-20': at20 as AnySum,
 	'called-within': calledWithin as AnySum,
+	'corner-twist': cornerTwist as AnySum,
 	displacement: displacement as AnySum,
 	'fit-clearance': fitClearance as AnySum,
 	'oil-clearance': oilClearance as AnySum,
 	'out-of-round': outOfRound as AnySum,
 	'reading-uncertainty': readingUncertainty as AnySum,
 	'ring-gap': ringGap as AnySum,
+	'rod-line': rodLine as AnySum,
+	runout: runout as AnySum,
 	'sheet-value': sheetValue as AnySum,
+	'shims-to-buy': shimsToBuy as AnySum,
 	'stage-turn': stageTurn as AnySum,
 	taper: taper as AnySum,
 	'tool-for-limits': toolForLimits as AnySum,

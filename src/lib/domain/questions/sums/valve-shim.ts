@@ -1,5 +1,5 @@
 import { computed, type Outcome } from '$lib/kernel/outcome';
-import { tidy } from '$lib/kernel/geometry/diameter-grid';
+import { shimForLashMm } from '$lib/kernel/geometry/valve-lash';
 import { z } from 'zod';
 import { sheetKeySchema } from '../words';
 import { shown } from './draw-reading';
@@ -31,14 +31,19 @@ export const valveShim: Sum<Parameters, Inputs> = {
 		{ words: 'Lash measured, cold', value: measured, unit: 'mm', decimals: 2 },
 		{ words: 'Shim fitted now', value: shim, unit: 'mm', decimals: 2 }
 	],
-	expected: ({ measured, wanted, shim }) =>
-		computed({ value: tidy(shim + measured - wanted), unit: 'mm', decimals: 2 }),
-	working: ({ measured, wanted, shim }) => [
-		{
-			words: 'What is too much lash must be filled by the shim',
-			formula: `${shim.toFixed(2)} + ${measured.toFixed(2)} − ${wanted.toFixed(2)}`,
-			value: shown(shim + measured - wanted, 2),
-			unit: 'mm'
-		}
-	]
+	expected({ measured, wanted, shim }) {
+		const found = shimForLashMm(shim, measured, wanted);
+		return found.ok ? computed({ value: found.value, unit: 'mm', decimals: 2 }) : found;
+	},
+	working({ measured, wanted, shim }) {
+		const found = shimForLashMm(shim, measured, wanted);
+		return [
+			{
+				words: 'What is too much lash must be filled by the shim',
+				rule: 'N = T + (A − V)',
+				formula: `${shim.toFixed(2)} + ${measured.toFixed(2)} − ${wanted.toFixed(2)}`,
+				...(found.ok ? { value: shown(found.value, 2), unit: 'mm' } : {})
+			}
+		];
+	}
 };
