@@ -9,7 +9,7 @@ export type Lack = { key: string; says: string };
  * results without limits to rule by.
  */
 export function lacksFor(
-	sheet: DataSheet,
+	sheet: Pick<DataSheet, 'dimensions'>,
 	{ grids, results }: Pick<JobSheet, 'grids' | 'results'>
 ): Lack[] {
 	const readings = grids

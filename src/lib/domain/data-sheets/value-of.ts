@@ -1,7 +1,10 @@
 import { keyedThings, type DataSheet, type Dimension, type Fastener, type Pattern } from './schema';
 
 /** A dimension by its key, such as `crankpin.oilClearance`. */
-export function dimensionOf(sheet: DataSheet, key: string): Dimension | undefined {
+export function dimensionOf(
+	sheet: Pick<DataSheet, 'dimensions'>,
+	key: string
+): Dimension | undefined {
 	return sheet.dimensions.find((one) => one.key === key);
 }
 

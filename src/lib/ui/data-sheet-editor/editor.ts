@@ -1,3 +1,4 @@
+import type { Finding } from '$lib/domain/data-sheets/consistency/finding';
 import type { DraftRow, SheetDraft } from '$lib/domain/data-sheets/draft/draft';
 import type { Choice, Field } from '$lib/domain/data-sheets/draft/field';
 import type { DraftOperation } from '$lib/domain/data-sheets/draft/operation';
@@ -10,6 +11,8 @@ import type { TypedChanges } from '$lib/domain/data-sheets/draft/typed-change';
 export type Editing = {
 	draft: SheetDraft;
 	faults: readonly DraftFault[];
+	/** What does not agree with the rest of the sheet; none while something cannot be read. */
+	findings: readonly Finding[];
 	/** Against the published revision; undefined where there is none. */
 	changes: TypedChanges | undefined;
 	/** Who teaches from which key, in words. */

@@ -1,4 +1,4 @@
-import { coarsePitchMm } from '$lib/kernel/fasteners/thread';
+import { coarsePitchMm } from '$lib/kernel/fasteners/standard-pitches';
 import { cannot, computed, type Outcome } from '$lib/kernel/outcome';
 import { parseStages } from '$lib/kernel/quantity/parse-stages';
 import { readNumber } from '$lib/kernel/quantity/read-number';

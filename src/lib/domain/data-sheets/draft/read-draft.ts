@@ -1,4 +1,5 @@
-import { dataSheetSchema, type DataSheet } from '../schema';
+import { dataSheetSchema, type DataSheet, type Dimension } from '../schema';
+import { dimensionSchema } from '../schema/dimension';
 import { headRow, type SheetDraft } from './draft';
 import { issueWords } from './issue-words';
 import { fieldsOf, rowSections, sections, type RowSection, type SectionName } from './sections';
@@ -34,6 +35,15 @@ export function readDraft(draft: SheetDraft, stamp: Stamp): ReadDraft {
 		if (!unread.has(`${fault.section}/${fault.row}`)) faults.push(fault);
 	}
 	return { faults };
+}
+
+/** The dimensions that can be read so far, whatever else is still to be put right. */
+export function dimensionsReadSoFar(draft: SheetDraft): Dimension[] {
+	return draft.rows.dimensions.flatMap(({ id, values }) => {
+		const faults: DraftFault[] = [];
+		const read = dimensionSchema.safeParse(readRow('dimensions', id, values, faults));
+		return read.success && faults.length === 0 ? [read.data] : [];
+	});
 }
 
 function readRow(

@@ -20,9 +20,7 @@ export async function prepareCourse(
 	// A data sheet's file makes its first revision and nothing after: later ones are made here.
 	const standing = await newestRevision(scope, 'data-sheet', sheet.key);
 	const current = standing ? dataSheetSchema.parse(standing.body) : sheet;
-	const things: Thing[] = standing
-		? []
-		: [thing('data-sheet', sheet.key, `${sheet.code} ${sheet.title}`, sheet)];
+	const things: Thing[] = standing ? [] : [dataSheetThing(sheet)];
 	for (const lesson of lessons) things.push(await lessonThing(lesson, current));
 	for (const one of questions) things.push(thing('question', one.key, one.key, one));
 	for (const one of quizzes) things.push(thing('quiz', one.key, one.title, one));
@@ -46,6 +44,10 @@ export async function publishAll(
 	return made;
 }
 
+export function dataSheetThing(sheet: DataSheet): Thing {
+	return thing('data-sheet', sheet.key, `${sheet.code} ${sheet.title}`, sheet);
+}
+
 function thing(kind: Thing['kind'], key: string, title: string, body: unknown): Thing {
 	const plain = JSON.parse(JSON.stringify(body)) as unknown;
 	return { kind, key, title, body: plain, hash: hashOf(plain) };
@@ -55,7 +57,7 @@ function thing(kind: Thing['kind'], key: string, title: string, body: unknown): 
  * A lesson's revision is the hash of its text, film, captions and the values in it. The text is
  * kept as it was rendered, so that what somebody read can be shown again.
  */
-async function lessonThing(lesson: Lesson, sheet: DataSheet): Promise<Thing> {
+export async function lessonThing(lesson: Lesson, sheet: DataSheet): Promise<Thing> {
 	const component = await lesson.load();
 	const { body: html } = await render(component, { context: new Map([[sheetContext, { sheet }]]) });
 	const film = lesson.filmFiles;

@@ -2,13 +2,16 @@ import { z } from 'zod';
 import { may } from '$lib/domain/access/policy';
 import { withoutOrders } from '$lib/domain/data-sheets/without-orders';
 import type { SheetDraft } from '$lib/domain/data-sheets/draft/draft';
-import { dataSheetSchema } from '$lib/domain/data-sheets/schema';
+import { dimensionsReadSoFar } from '$lib/domain/data-sheets/draft/read-draft';
+import { lacksFor } from '$lib/domain/data-sheets/lacks';
+import { dataSheetSchema, type DataSheet } from '$lib/domain/data-sheets/schema';
 import type { JobSheet } from '$lib/domain/job-sheets/schema';
 import { draftsOf, findDraft } from '../../data/queries/drafts';
 import { newestRevision, newestRevisions } from '../../data/queries/publications';
 import { openSittingOf } from '../../data/queries/sittings';
 import type { SchoolScope } from '../../data/scope';
 import { readCase } from '../use-case';
+import { sheetAsFile, sheetFileKinds } from './sheet-as-file';
 
 /** The school's data sheets; whoever may edit them sees the drafts beside. */
 export const listDataSheets = readCase({
@@ -27,6 +30,10 @@ export const listDataSheets = readCase({
 			const draft = drafts.find((one) => one.key === key);
 			return draft ? { updatedAt: draft.updatedAt, updatedBy: draft.updatedByName } : null;
 		};
+		const lacksOf = (sheet: Pick<DataSheet, 'dimensions'>) =>
+			jobSheets
+				.map((one) => one.body as JobSheet)
+				.map((one) => ({ jobSheet: one.title, lacks: lacksFor(sheet, one) }));
 		return {
 			mayEdit,
 			sheets: sheets.map(({ key, body, publishedAt }) => {
@@ -40,15 +47,18 @@ export const listDataSheets = readCase({
 					issuedOn,
 					isPublic: sheet.public,
 					publishedAt,
-					draft: draftOf(key)
+					draft: draftOf(key),
+					lacks: lacksOf(sheet)
 				};
 			}),
 			/** Begun and never published. */
 			begun: drafts
 				.filter((draft) => !sheets.some((one) => one.key === draft.key))
 				.map((draft) => {
-					const { code = '', title = '' } = (draft.body as SheetDraft).head;
-					return { key: draft.key, code, title, draft: draftOf(draft.key) };
+					const body = draft.body as SheetDraft;
+					const { code = '', title = '' } = body.head;
+					const lacks = lacksOf({ dimensions: dimensionsReadSoFar(body) });
+					return { key: draft.key, code, title, draft: draftOf(draft.key), lacks };
 				})
 		};
 	}
@@ -78,6 +88,21 @@ export const readDataSheet = readCase({
 			mayReadHistory: may(actor, 'publication:read', { schoolId: scope.schoolId }),
 			draft: draft ? { updatedAt: draft.updatedAt } : null
 		};
+	}
+});
+
+/** The sheet as it stands, as a file. */
+export const exportDataSheet = readCase({
+	name: 'export-data-sheet',
+	action: 'lesson:read',
+	input: z.object({ key: z.string(), as: z.enum(sheetFileKinds) }),
+	async subject({ scope, input }) {
+		const revision = await newestRevision(scope, 'data-sheet', input.key);
+		return revision && { schoolId: scope.schoolId, revision };
+	},
+	async run({ scope, me, input, subject: { revision } }) {
+		const sheet = dataSheetSchema.parse(revision.body);
+		return sheetAsFile((await isSitting(scope, me)) ? withoutOrders(sheet) : sheet, input.as);
 	}
 });
 
