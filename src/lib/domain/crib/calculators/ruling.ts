@@ -49,8 +49,8 @@ export const ruling = calculator({
 		rule: choice({
 			words: 'Guard band',
 			options: [
-				{ value: 'full-U', words: `The house’s rule: ${guardBandRules['full-U'].says}` },
-				{ value: 'one-sided-95', words: guardBandRules['one-sided-95'].says }
+				{ value: 'full-U', words: 'g = U, the house’s rule' },
+				{ value: 'one-sided-95', words: 'g = 1.645 u, 95 % on one side' }
 			],
 			initial: 'full-U',
 			example: 'full-U'
