@@ -10,7 +10,12 @@ const sheets = catalogue().engines.map((one) => [one.code, figuresOf(one)] as co
 type Asked = [name: SumName, given: Record<string, unknown>, least: number, most: number];
 const asked: Asked[] = [
 	['reading-uncertainty', { of: 'crankpin.diameter', readings: 1, ask: 'expanded' }, 0.001, 0.009],
-	['reading-uncertainty', { of: 'crankpin.diameter', readings: 4, ask: 'standard' }, 0.0005, 0.0095],
+	[
+		'reading-uncertainty',
+		{ of: 'crankpin.diameter', readings: 4, ask: 'standard' },
+		0.0005,
+		0.0095
+	],
 	['reading-uncertainty', { of: 'crankpin.diameter', readings: 4, ask: 'scatter' }, 0.0004, 0.02],
 	['called-within', { of: 'crankpin.diameter', purpose: 'build', edge: 'up-to' }, 39, 80],
 	[
