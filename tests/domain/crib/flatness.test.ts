@@ -39,6 +39,10 @@ describe('flatness of a face', () => {
 		);
 		expect(figureOf(worked, 'stretch')).toBeCloseTo(0.0035 * 25.4, 6);
 		expect(worked.rulings?.map((one) => one.ruling.ruling)).toEqual(['within', 'within']);
+		// Typed in inches, nothing of it is printed as binary leaves it.
+		const printed = JSON.stringify([worked.working, worked.lines.map((one) => one.words)]);
+		expect(printed).toContain('within 152.4 mm');
+		expect(printed).not.toMatch(/\d\.\d{5,}[^\d.,}]*·/);
 	});
 	it('takes gaps under a straight edge, and says what it cannot see', () => {
 		const worked = workedOf(flatness, {

@@ -41,7 +41,9 @@ const asked: Asked[] = [
 	[petrol, 'shims-to-buy', { lash: 'valve.inletLash' }, 1, 3]
 ];
 
-describe.each(asked)('%o %s %j', (sheet, name, given, least, most) => {
+const cases = asked.map(([sheet, ...one]) => [sheet.title, ...one, sheet] as const);
+
+describe.each(cases)('%s: %s %j', (_, name, given, least, most, sheet) => {
 	it('lies within its bounds over 200 seeds, and its working ends in it', () => {
 		for (let one = 0; one < 200; one++) {
 			const { inputs, expected, sum } = drawn(name, given, sheet, `seed-${one}`);

@@ -61,5 +61,5 @@ export function straightness(
 	if (best) return computed(best);
 	return atMm.length < 3
 		? cannot('two readings always lie in a line: take at least three')
-		: cannot(`no three readings lie within ${withinMm} mm: read at closer places`);
+		: cannot(`no three readings lie within ${tidy(withinMm)} mm: read at closer places`);
 }

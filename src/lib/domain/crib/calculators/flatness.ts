@@ -4,6 +4,7 @@ import { computed, type Outcome } from '$lib/kernel/outcome';
 import { calculator } from '../calculator';
 import { choice, grid, list, quantity } from '../field';
 import type { Worked } from '../worked';
+import { plain } from './formula-figures';
 import { drawnFace } from './flatness/drawn';
 import { overallByDial, overallByFeeler, type Overall } from './flatness/overall';
 import { presetsOf } from './flatness/presets';
@@ -161,7 +162,7 @@ function withLines(
 		working: [
 			...overall.steps,
 			...(within?.ok && stretchMm !== undefined
-				? [lineStep(within.value, `within ${stretchMm} mm`)]
+				? [lineStep(within.value, `within ${plain(stretchMm)} mm`)]
 				: []),
 			...(whole.ok ? [lineStep(whole.value, 'end to end')] : []),
 			...rulings.value.steps

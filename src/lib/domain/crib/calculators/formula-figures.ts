@@ -6,7 +6,12 @@ export function figure(value: number, decimals = 3): string {
 	return formatQuantity(value, '', Number(`1e-${decimals}`));
 }
 
-/** The same after a sign of its own: what lies below zero stands in brackets. */
+/** A size as it was typed: no more places than it has, and no dust from another unit. */
+export function plain(value: number): string {
+	return String(Number(value.toFixed(4))).replace('-', '−');
+}
+
+/** A figure after a sign of its own: what lies below zero stands in brackets. */
 export function bracketed(value: number, decimals = 3): string {
 	const printed = figure(value, decimals);
 	return printed.startsWith('−') ? `(${printed})` : printed;

@@ -9,7 +9,7 @@ import type { Step } from '../../working';
 import { calculator } from '../calculator';
 import { grid, quantity } from '../field';
 import type { FigureLine } from '../worked';
-import { bracketed, figure } from './formula-figures';
+import { bracketed, figure, plain } from './formula-figures';
 import { ruledAgainst } from './ruled-against';
 
 const length = { dimension: 'length', unit: { metric: 'mm', inch: 'in' } } as const;
@@ -144,7 +144,7 @@ function plane(
 	const found = outOfLinePer100Mm(small, big);
 	if (!found.ok) return found;
 	const tilt = (one: MandrelReadings) =>
-		`(${figure(one.farMm)} − ${bracketed(one.nearMm)}) / ${one.apartMm} · 100`;
+		`(${figure(one.farMm)} − ${bracketed(one.nearMm)}) / ${plain(one.apartMm)} · 100`;
 	return computed({
 		per100Mm: found.value,
 		weights: outOfLineWeights(small, big),
@@ -184,7 +184,7 @@ function lengthOf(given: {
 			{
 				words: 'Centre to centre: over both mandrels less half of each',
 				rule: 'L = H − (D + d) / 2',
-				formula: `${over} − (${bigMandrel} + ${smallMandrel}) / 2`,
+				formula: `${plain(over)} − (${plain(bigMandrel)} + ${plain(smallMandrel)}) / 2`,
 				...mm
 			}
 		]

@@ -3,7 +3,7 @@ import { ruleReading, type RulingQuestion } from '$lib/kernel/measurement/ruling
 import { computed, type Outcome } from '$lib/kernel/outcome';
 import type { Step } from '../../working';
 import type { RuledReading } from '../worked';
-import { figure } from './formula-figures';
+import { figure, plain } from './formula-figures';
 
 /** A result that some readings of one uncertainty went into, and the most that each question allows. */
 export type Judged = {
@@ -45,7 +45,7 @@ export function ruledAgainst(
 			steps.push({
 				words: `${of}: uncertainty from that of one reading`,
 				rule: 'U = U1 · √(Σ weight²)',
-				formula: `${readingMm.toFixed(3)} · √(${weights.map((one) => `${figure(Math.abs(one), 4)}²`).join(' + ')})`,
+				formula: `${plain(readingMm)} · √(${weights.map((one) => `${figure(Math.abs(one), 4)}²`).join(' + ')})`,
 				value: expanded.value,
 				unit: 'mm',
 				decimals: 4

@@ -11,7 +11,7 @@ import { computed } from '$lib/kernel/outcome';
 import type { DataSheet } from '../../data-sheets/schema';
 import { calculator, type Preset } from '../calculator';
 import { choice, number, quantity } from '../field';
-import { bracketed, figure } from './formula-figures';
+import { bracketed, figure, plain } from './formula-figures';
 import { allOf } from './temperature/all-of';
 import { expandedAt20, ruledAt20, type Warm } from './temperature/ruled';
 
@@ -109,7 +109,7 @@ export const temperature = calculator({
 		if (!limits.ok) return limits;
 		const fine = { unit: 'mm', decimals: 4 };
 		const grown = (body: Body) =>
-			`${reading} · ${millionths(body.expansionPerK)} · (${degrees(body.temperatureC)} − 20)`;
+			`${plain(reading)} · ${millionths(body.expansionPerK)} · (${degrees(body.temperatureC)} − 20)`;
 		return computed({
 			lines: [
 				{ key: 'at-20', words: 'Size at 20 °C', value: at20, unit: 'mm', decimals: 3, main: true },
@@ -147,7 +147,7 @@ export const temperature = calculator({
 				{
 					words: 'Size at 20 °C',
 					rule: 'L20 = L + ΔLs − ΔLp',
-					formula: `${reading} + ${bracketed(correction, 4)}`,
+					formula: `${plain(reading)} + ${bracketed(correction, 4)}`,
 					value: at20,
 					unit: 'mm',
 					decimals: 3
@@ -237,5 +237,5 @@ function millionths(perK: number): string {
 }
 
 function degrees(valueC: number): string {
-	return figure(valueC, 1).replace(/\.0$/, '');
+	return plain(valueC);
 }

@@ -1,5 +1,6 @@
 import type { FaceGrid, WorstLine } from '$lib/kernel/geometry/flatness';
 import type { FaceDrawing } from '../../drawings/face';
+import { plain } from '../formula-figures';
 import type { Overall } from './overall';
 
 /** The face with its readings, and its worst line from the side. */
@@ -45,7 +46,7 @@ function worstOf(
 		worst: {
 			fromMm: place(first),
 			toMm: place(last),
-			words: `${name}: ${widthMm.toFixed(3)} mm in ${Number((x3 - x1).toFixed(1))} mm`
+			words: `${name}: ${widthMm.toFixed(3)} mm in ${plain(x3 - x1)} mm`
 		},
 		profile: {
 			atMm: line.atMm.map((one) => one - (line.atMm[0] ?? 0)),

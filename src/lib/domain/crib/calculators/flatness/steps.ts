@@ -1,7 +1,7 @@
 import type { Cell, WorstLine } from '$lib/kernel/geometry/flatness';
 import type { FacePoint } from '$lib/kernel/geometry/minimum-zone';
 import type { Step } from '../../../working';
-import { bracketed, figure } from '../formula-figures';
+import { bracketed, figure, plain } from '../formula-figures';
 
 const mm = { unit: 'mm', decimals: 3 };
 
@@ -10,7 +10,7 @@ export function placeWords({ row, column }: Cell): string {
 }
 
 export function stretchWords(stretchMm: number): string {
-	return `Worst within ${stretchMm} mm along a line`;
+	return `Worst within ${plain(stretchMm)} mm along a line`;
 }
 
 /** The width as a sum that a person can add up again: the readings held, each with its weight. */
@@ -46,7 +46,7 @@ export function lineStep({ line, held, widthMm }: WorstLine, stretch: string): S
 		rule: '|z2 − (z1 + (z3 − z1) · (x2 − x1) / (x3 − x1))|',
 		...(a && b && c
 			? {
-					formula: `|${figure(b.z)} − (${figure(a.z)} + (${figure(c.z)} − ${bracketed(a.z)}) · ${length(b.x - a.x)} / ${length(c.x - a.x)})|`
+					formula: `|${figure(b.z)} − (${figure(a.z)} + (${figure(c.z)} − ${bracketed(a.z)}) · ${plain(b.x - a.x)} / ${plain(c.x - a.x)})|`
 				}
 			: {}),
 		value: widthMm,
@@ -59,8 +59,4 @@ function where(these: readonly { point: Cell; weight: number }[], side: 1 | -1):
 		.filter(({ weight }) => weight * side > 0)
 		.map(({ point }) => placeWords(point))
 		.join(' and ');
-}
-
-function length(valueMm: number): string {
-	return String(Number(valueMm.toFixed(2)));
 }
