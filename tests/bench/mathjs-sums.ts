@@ -35,28 +35,36 @@ export function ruledGridInUnits(): () => unknown[] {
 	};
 }
 
+/** From the middle outwards, as the kernel goes where bolts stand on no ring: no two in one place first. */
 export function orderInUnits(): () => string[] {
 	const bolts = bolts24.map(({ id, xMm, yMm }) => ({ id, x: mm(xMm), y: mm(yMm) }));
 	type Placed = { x: Unit; y: Unit };
 	const mean = (these: Unit[]) => math.mean(these as never) as unknown as Unit;
+	const times = (a: Unit, by: number) => math.multiply(a, by) as Unit;
 	const apart = (a: Placed, b: Placed) =>
 		math.sqrt(
 			math.add(math.square(less(a.x, b.x) as never), math.square(less(a.y, b.y) as never)) as never
 		) as unknown as Unit;
-	const hair = mm(1e-6);
+	const [hair, onePlace] = [mm(1e-9), mm(1)];
 	return () => {
+		for (const [at, a] of bolts.entries())
+			for (const b of bolts.slice(at + 1))
+				if (below(apart(a, b), onePlace)) throw new Error('two bolts stand in one place');
 		const middle = { x: mean(bolts.map((one) => one.x)), y: mean(bolts.map((one) => one.y)) };
-		const left = bolts.map((one) => ({ ...one, reach: apart(one, middle) }));
+		let left = bolts
+			.map((one) => ({ ...one, reach: apart(one, middle) }))
+			.sort((a, b) => a.id.localeCompare(b.id, 'en', { numeric: true }));
+		const room = plus(times(widest(left.map((one) => one.reach)), 0.02), hair);
 		const out: (typeof left)[number][] = [];
 		while (left.length > 0) {
 			const nearest = math.min(...(left.map((one) => one.reach) as never[])) as Unit;
-			const ring = left.filter((one) => notAbove(one.reach, plus(nearest, hair)));
+			const sound = left.filter((one) => notAbove(one.reach, plus(nearest, room)));
 			const last = out.at(-1);
-			const next = ring.reduce((best, one) =>
-				last && below(apart(best, last), apart(one, last)) ? one : best
+			const next = sound.reduce((best, one) =>
+				last && below(times(apart(best, last), 1.000001), apart(one, last)) ? one : best
 			);
 			out.push(next);
-			left.splice(left.indexOf(next), 1);
+			left = left.filter((one) => one !== next);
 		}
 		return out.map((one) => one.id);
 	};
