@@ -37,6 +37,11 @@ const table: Record<string, Line> = {
 	'/(public)/check/[code]': { read: 'anyone' },
 	'/(public)/crib': { read: 'anyone' },
 	'/(public)/crib/[calculator]': { read: 'anyone' },
+	'/(public)/data-sheets': { read: 'anyone' },
+	'/(public)/data-sheets/[school]/[sheet]': { read: 'anyone' },
+	'/(public)/data-sheets/[school]/[sheet].csv': { read: 'anyone' },
+	'/(public)/data-sheets/[school]/[sheet].json': { read: 'anyone' },
+	'/(public)/data-sheets/index.json': { read: 'anyone' },
 	'/(public)/prospectus': { read: 'anyone' },
 	'/(auth)/account': {
 		read: 'signed-in',
@@ -149,8 +154,29 @@ const table: Record<string, Line> = {
 			'withdraw-token': office({ id: ulid })
 		}
 	},
-	'/s/[school]/data-sheets': { read: all },
+	'/s/[school]/data-sheets': {
+		read: all,
+		actions: {
+			begin: byInstructors({ code: 'KT-900', title: 'x' }),
+			'from-file': byInstructors({ text: 'dimensions: []' })
+		}
+	},
 	'/s/[school]/data-sheets/[sheet]': { read: all },
+	'/s/[school]/data-sheets/[sheet]/draft': {
+		read: instructors,
+		actions: {
+			begin: byInstructors(),
+			'read-file': byInstructors({ baseVersion: '1', text: 'dimensions: []' }),
+			discard: byInstructors({ baseVersion: '1' })
+		}
+	},
+	'/s/[school]/data-sheets/[sheet]/draft/publish': {
+		read: [],
+		actions: { default: byInstructors({ baseVersion: '1' }) }
+	},
+	'/s/[school]/data-sheets/[sheet]/file': { read: all },
+	'/s/[school]/data-sheets/[sheet]/revisions': { read: staff },
+	'/s/[school]/data-sheets/[sheet]/revisions/[revision]': { read: staff },
 	'/s/[school]/files/[file]': { read: ['student2', ...instructors, 'verifier'] },
 
 	'/api/v1/schools/[school]/cohorts': { read: [...instructors, 'office'] },
@@ -160,6 +186,16 @@ const table: Record<string, Line> = {
 	},
 	'/api/v1/schools/[school]/cohorts/[cohort]/roster/plan': {
 		writes: { method: 'POST', may: ['office'], body: { list: 'A,a@b.example' } }
+	},
+	'/api/v1/schools/[school]/data-sheets/[sheet]/draft/operations': {
+		writes: {
+			method: 'POST',
+			may: instructors,
+			body: {
+				baseVersion: 1,
+				operations: [{ kind: 'set', section: 'head', row: 'head', field: 'title', value: 'x' }]
+			}
+		}
 	},
 	'/api/v1/schools/[school]/enrolments/[enrolment]/steps/[step]/watched': {
 		writes: { method: 'POST', may: [own], body: { filmHash: 'x', positionS: 0, intervals: [] } }
@@ -256,6 +292,7 @@ async function namesFor(dataDir: string): Promise<Names> {
 			"SELECT c.id FROM cohorts c JOIN schools s ON s.id = c.schoolId WHERE s.slug = 'averholm'"
 		),
 		sheet: 'av3-1150',
+		revision: 'C',
 		calculator: 'oil-clearance',
 		code: 'RL-0000-0000-0000',
 		token: 'a-token-that-was-never-given-out'

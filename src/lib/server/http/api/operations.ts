@@ -1,6 +1,7 @@
 import type { z } from 'zod';
 import { readCohorts } from '../../services/cohorts/read-cohorts';
 import { applyCohortRoster, planCohortRoster } from '../../services/cohorts/plan-roster';
+import { workOnSheetDraft } from '../../services/courses/work-on-sheet-draft';
 import { watchFilm } from '../../services/learning/watch-film';
 import { listWaiting } from '../../services/marking/list-waiting';
 import { readProgress } from '../../services/progress/read-progress';
@@ -114,6 +115,14 @@ export const apiOperations: readonly ApiOperation[] = [
 		summary: 'Report watched stretches of a film',
 		useCase: watchFilm,
 		inPath: { enrolment: 'enrolmentId', step: 'stepKey' },
+		scope: null
+	},
+	{
+		method: 'post',
+		path: `${school}/data-sheets/{sheet}/draft/operations`,
+		summary: 'Change the draft of a data sheet',
+		useCase: workOnSheetDraft,
+		inPath: { sheet: 'key' },
 		scope: null
 	}
 ];

@@ -42,7 +42,8 @@ export const listPublicSheets = readCase({
 async function publicSheet(scope: SchoolScope, key: string) {
 	const revision = await newestRevision(scope, 'data-sheet', key);
 	const sheet = revision && dataSheetSchema.parse(revision.body);
-	if (!sheet?.public) throw new Problem('absent', 'There is no public data sheet at this address.');
+	if (!revision || !sheet?.public)
+		throw new Problem('absent', 'There is no public data sheet at this address.');
 	return { sheet, hash: revision.hash, publishedAt: revision.publishedAt };
 }
 

@@ -1,0 +1,3 @@
+import { publicSheetFile } from '$lib/server/http/send-sheet';
+
+export const GET = publicSheetFile('json');
