@@ -1,3 +1,11 @@
+import type { DeckDrawing } from './drawings/deck';
+import type { EndFloatDrawing } from './drawings/end-float';
+import type { FitDrawing } from './drawings/fit';
+import type { GaugingThreadDrawing } from './drawings/gauging-thread';
+import type { RingGapDrawing } from './drawings/ring-gap';
+import type { ShellChoiceDrawing } from './drawings/shell-choice';
+import type { ShellCrushDrawing } from './drawings/shell-crush';
+import type { GridSectionDrawing } from './drawings/grid-section';
 import type { ThreadProfileDrawing } from './drawings/thread-profile';
 import type { TorqueAngleDrawing } from './drawings/torque-angle';
 import type { TorqueSharesDrawing } from './drawings/torque-shares';
@@ -31,4 +39,12 @@ export type Drawing =
 	| BoltLoadDrawing
 	| TorqueSharesDrawing
 	| TorqueAngleDrawing
-	| ThreadProfileDrawing;
+	| ThreadProfileDrawing
+	| GridSectionDrawing
+	| DeckDrawing
+	| EndFloatDrawing
+	| FitDrawing
+	| GaugingThreadDrawing
+	| RingGapDrawing
+	| ShellChoiceDrawing
+	| ShellCrushDrawing;

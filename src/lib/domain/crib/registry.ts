@@ -11,6 +11,17 @@ import { friction } from './calculators/friction';
 import { preload } from './calculators/preload';
 import { thread } from './calculators/thread';
 import { torqueAngle } from './calculators/torque-angle';
+import { bore } from './calculators/bore';
+import { journal } from './calculators/journal';
+import { gaugingThread } from './calculators/gauging-thread';
+import { shellChoice } from './calculators/shell-choice';
+import { shellCrush } from './calculators/shell-crush';
+import { endFloat } from './calculators/end-float';
+import { pistonToBore } from './calculators/piston-to-bore';
+import { ringGap } from './calculators/ring-gap';
+import { ringSideClearance } from './calculators/ring-side-clearance';
+import { deckHeight } from './calculators/deck-height';
+import { stemToGuide } from './calculators/stem-to-guide';
 import { valveShims } from './calculators/valve-shims';
 import { whichTool } from './calculators/which-tool';
 
@@ -20,7 +31,18 @@ export const calculators: readonly AnyCalculator[] = [
 	friction,
 	torqueAngle,
 	thread,
+	bore,
+	journal,
 	oilClearance,
+	gaugingThread,
+	shellChoice,
+	shellCrush,
+	endFloat,
+	pistonToBore,
+	ringGap,
+	ringSideClearance,
+	deckHeight,
+	stemToGuide,
 	flatness,
 	rod,
 	valveShims,

@@ -44,10 +44,22 @@ export function onScaleMm(scale: readonly ScaleMark[], widthMm: number): Outcome
 	const marks = scale.toSorted((a, b) => a.widthMm - b.widthMm);
 	if (marks.some((one, at) => at > 0 && one.clearanceMm >= (marks[at - 1]?.clearanceMm ?? 0)))
 		return cannot('a wider mark says a smaller clearance: look at the scale again');
-	const after = marks.findIndex((one) => one.widthMm >= widthMm);
-	const [low, high] = [marks[after - 1] ?? marks[after], marks[after]];
-	if (!low || !high || !(widthMm >= low.widthMm))
-		return cannot('the width lies beyond the scale: use a thread of another range');
+	const around = marksAround(marks, widthMm);
+	if (!around) return cannot('the width lies beyond the scale: use a thread of another range');
+	const [low, high] = around;
 	const share = high === low ? 0 : (widthMm - low.widthMm) / (high.widthMm - low.widthMm);
 	return computed(tidy(low.clearanceMm + share * (high.clearanceMm - low.clearanceMm)));
+}
+
+/** The two marks that a width lies between, twice the first where it is as wide; none beyond the scale. */
+export function marksAround(
+	scale: readonly ScaleMark[],
+	widthMm: number
+): readonly [low: ScaleMark, high: ScaleMark] | undefined {
+	const marks = scale.toSorted((a, b) => a.widthMm - b.widthMm);
+	const after = marks.findIndex((one) => one.widthMm >= widthMm);
+	const high = marks[after];
+	if (!high) return undefined;
+	const low = high.widthMm === widthMm ? high : marks[after - 1];
+	return low && [low, high];
 }

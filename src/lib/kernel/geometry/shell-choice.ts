@@ -4,8 +4,8 @@ import { clearanceFromShellsMm } from './fit';
 export type ShellChoice = {
 	/** Clearance that each wall gives, in the order given, mm. */
 	clearancesMm: number[];
-	/** The wall whose clearance lies nearest the middle of the limits, counted from 0. */
-	chosen: number;
+	/** The wall to fit, counted from 0; none where no clearance lies inside the limits. */
+	chosen?: number;
 };
 
 /**
@@ -15,7 +15,7 @@ export type ShellChoice = {
  * Formula: C = H − 2 · w − D for each wall w; least |C − (least + most)/2| of those within.
  * @param housingMm bore without shells, mm @param pinMm mm @param wallsMm at the crown, mm
  * @param limits of the clearance, mm
- * @returns all clearances and the choice; "cannot" where none lies inside the limits
+ * @returns all clearances, and the choice where one lies inside the limits
  * Source: definition of the clearance; the choice nearest the middle is common practice, no source.
  * @example chooseShells(43, 39.99, [1.486, 1.489], { leastMm: 0.02, mostMm: 0.048 }) // 1.489: 0.032
  */
@@ -38,9 +38,8 @@ export function chooseShells(
 		one < leastMm - 1e-9 || one > mostMm + 1e-9 ? Infinity : Math.abs(one - (leastMm + mostMm) / 2)
 	);
 	const nearest = Math.min(...off);
-	return nearest === Infinity
-		? cannot(
-				'no listed shell gives a clearance inside the limits: machine the pin, or look at the housing'
-			)
-		: computed({ clearancesMm, chosen: off.indexOf(nearest) });
+	return computed({
+		clearancesMm,
+		...(nearest < Infinity ? { chosen: off.indexOf(nearest) } : {})
+	});
 }

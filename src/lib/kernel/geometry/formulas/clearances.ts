@@ -64,7 +64,7 @@ export const clearanceFormulas: readonly Formula[] = [
 			gives: () =>
 				part(
 					chooseShells(43, 39.99, [1.486, 1.489], { leastMm: 0.02, mostMm: 0.048 }),
-					(one) => one.clearancesMm[one.chosen] ?? NaN
+					(one) => one.clearancesMm[one.chosen ?? -1] ?? NaN
 				),
 			wanted: 0.032,
 			within: 1e-6

@@ -4,6 +4,14 @@ import BoltLoad from './BoltLoad.svelte';
 import TorqueShares from './TorqueShares.svelte';
 import TorqueAngle from './TorqueAngle.svelte';
 import ThreadProfile from './ThreadProfile.svelte';
+import Deck from './Deck.svelte';
+import EndFloat from './EndFloat.svelte';
+import Fit from './Fit.svelte';
+import GaugingThread from './GaugingThread.svelte';
+import RingGap from './RingGap.svelte';
+import ShellChoice from './ShellChoice.svelte';
+import ShellCrush from './ShellCrush.svelte';
+import GridSection from './GridSection.svelte';
 import Budget from './Budget.svelte';
 import Clearance from './Clearance.svelte';
 import Conformance from './Conformance.svelte';
@@ -32,7 +40,15 @@ const components: Drawn = {
 	'bolt-load': BoltLoad,
 	'torque-shares': TorqueShares,
 	'torque-angle': TorqueAngle,
-	'thread-profile': ThreadProfile
+	'thread-profile': ThreadProfile,
+	'grid-section': GridSection,
+	deck: Deck,
+	'end-float': EndFloat,
+	fit: Fit,
+	'gauging-thread': GaugingThread,
+	'ring-gap': RingGap,
+	'shell-choice': ShellChoice,
+	'shell-crush': ShellCrush
 };
 
 export function drawingComponent(kind: Drawing['kind']): Component<{ drawing: Drawing }> {
