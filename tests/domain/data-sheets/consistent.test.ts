@@ -1,113 +1,26 @@
 import { describe, expect, it } from 'vitest';
 import { catalogue } from '$lib/content/catalogue';
-import type { DataSheet } from '$lib/domain/data-sheets/schema';
-import { dimensionOf, fastenerOf, patternOf } from '$lib/domain/data-sheets/value-of';
+import { checkSheet } from '$lib/domain/data-sheets/consistency/check-sheet';
+import type { DataSheet, Dimension, Fastener } from '$lib/domain/data-sheets/schema';
+import { dataSheetSchema } from '$lib/domain/data-sheets/schema';
+import { dimensionOf, fastenerOf } from '$lib/domain/data-sheets/value-of';
 import { displacementCm3 } from '$lib/kernel/cylinder/displacement';
-import { preloadN } from '$lib/kernel/fasteners/preload';
-import { proofLoadN } from '$lib/kernel/fasteners/proof-load';
-import { stressAreaMm2 } from '$lib/kernel/fasteners/stress-area';
-import { travelMm } from '$lib/kernel/fasteners/turn';
-
-/** Nut factors that bracket a lubrication: textbook and supplier tables, reference 04, K-a to K-k. */
-function nutFactors(lubrication: string): { least: number; most: number } {
-	if (/oiled/.test(lubrication)) return { least: 0.15, most: 0.2 };
-	return { least: 0.18, most: 0.25 };
-}
-
-/** 0.2 % proof stress, ISO 898-1:2013, table 3. */
-const yieldStressMPa = { '8.8': 640, '10.9': 940, '12.9': 1100 };
 
 const { engines } = catalogue();
-const build = (sheet: DataSheet, key: string) => {
-	const found = dimensionOf(sheet, key)?.build;
-	if (!found) throw new Error(`${sheet.code} gives no limits for ${key}`);
-	return found;
-};
-
-/** Bore less what turns or slides in it: the clearances that the limits of both can give. */
-const fits = [
-	['crankpin.bearingBore', 'crankpin.diameter', 'crankpin.oilClearance'],
-	['mainJournal.bearingBore', 'mainJournal.diameter', 'mainJournal.oilClearance'],
-	['cylinder.bore', 'piston.diameter', 'piston.clearance'],
-	['valve.inletGuide', 'valve.inletStem', 'valve.inletStemClearance']
-] as const;
 
 describe.each(engines.map((sheet) => [sheet.code, sheet] as const))('data sheet %s', (_, sheet) => {
-	it.each(fits.filter(([, , clearance]) => dimensionOf(sheet, clearance)))(
-		'gives for %s and %s exactly the clearances that it prints',
-		(boreKey, pinKey, clearanceKey) => {
-			const [bore, pin] = [build(sheet, boreKey), build(sheet, pinKey)];
-			const clearance = build(sheet, clearanceKey);
-			expect(clearance.least).toBeCloseTo(bore.least - pin.most, 6);
-			expect(clearance.most).toBeCloseTo(bore.most - pin.least, 6);
-		}
-	);
-
-	it('lets nothing run again that would be refused when building, and wears the right way', () => {
-		for (const { key, build, runAgain } of sheet.dimensions) {
-			if (!build || !runAgain) continue;
-			const names = `${key}: to run again is wider than to build`;
-			if (runAgain.most !== undefined)
-				expect(runAgain.most, names).toBeGreaterThanOrEqual(build.most);
-			if (runAgain.least !== undefined)
-				expect(runAgain.least, names).toBeLessThanOrEqual(build.least);
-		}
+	it('agrees with itself: nothing is refused and nothing is left to explain', () => {
+		expect(checkSheet(sheet)).toEqual([]);
 	});
-
-	it('keeps a bolt that is fitted again below its proof load, even well oiled', () => {
-		for (const bolt of sheet.fasteners) {
-			if (bolt.yieldTightened) continue;
-			const last = bolt.stages.at(-1);
-			if (!last || !('torqueNm' in last)) throw new Error(`${bolt.key} ends in an angle`);
-			const { diameterMm, pitchMm } = bolt.thread;
-			const proof = proofLoadN(diameterMm, pitchMm, bolt.propertyClass);
-			const preload = preloadN(last.torqueNm, nutFactors(bolt.lubrication).least, diameterMm);
-			if (!proof.ok || !preload.ok) throw new Error(`${bolt.key} cannot be computed`);
-			const share = preload.value / proof.value;
-			expect(share, `${bolt.key} is loaded to ${share} of proof`).toBeLessThan(0.9);
-		}
+	it('is complete: sizes, fasteners, patterns, the ways of oil and coolant, weak points', () => {
+		expect(sheet.dimensions.length).toBeGreaterThanOrEqual(60);
+		expect(sheet.fasteners.length).toBeGreaterThanOrEqual(15);
+		expect(sheet.patterns.length).toBeGreaterThanOrEqual(4);
+		for (const fluid of ['oil', 'coolant'])
+			expect(sheet.ports.filter((one) => one.carries === fluid).length).toBeGreaterThanOrEqual(5);
+		expect(sheet.weakPoints.length).toBeGreaterThanOrEqual(4);
+		expect(sheet.fits.length).toBeGreaterThanOrEqual(8);
 	});
-
-	it('turns a yield-tightened bolt through yield, not far beyond, and says single use', () => {
-		for (const bolt of sheet.fasteners.filter((one) => one.yieldTightened)) {
-			const { diameterMm, pitchMm } = bolt.thread;
-			const area = stressAreaMm2(diameterMm, pitchMm);
-			const [first] = bolt.stages;
-			if (!area.ok || !bolt.gripMm || !first || !('torqueNm' in first))
-				throw new Error(`${bolt.key} is snugged first and says its grip`);
-			const snug = preloadN(first.torqueNm, nutFactors(bolt.lubrication).least, diameterMm);
-			if (!snug.ok) throw new Error(snug.because);
-			const turned = bolt.stages.reduce(
-				(sum, one) => sum + ('angleDeg' in one ? one.angleDeg : 0),
-				0
-			);
-			// Steel, 205 GPa; clamped parts about three times as stiff as the bolt, in series with it.
-			const stiffness = 0.75 * ((205_000 * area.value) / bolt.gripMm);
-			const yieldN = area.value * yieldStressMPa[bolt.propertyClass];
-			const beyondMm = (snug.value + travelMm(turned, pitchMm) * stiffness - yieldN) / stiffness;
-			expect(snug.value, `${bolt.key} is only snugged first`).toBeLessThan(yieldN * 0.6);
-			expect(beyondMm, `${bolt.key} does not reach yield`).toBeGreaterThan(0);
-			expect(beyondMm / bolt.gripMm, `${bolt.key} is drawn too far`).toBeLessThan(0.01);
-			expect(bolt.reuse).toMatch(/new each time/);
-		}
-	});
-
-	it('prints orders that go from the middle outwards and never down one side', () => {
-		for (const { key, bolts, printedOrder } of sheet.patterns) {
-			if (!printedOrder) continue;
-			const at = (id: string) => {
-				const bolt = bolts.find((one) => one.id === id);
-				if (!bolt) throw new Error(`${key} has no ${id}`);
-				return bolt;
-			};
-			const first = Math.abs(at(printedOrder[0] ?? '').xMm);
-			const last = Math.abs(at(printedOrder.at(-1) ?? '').xMm);
-			expect(first, key).toBe(Math.min(...bolts.map((one) => Math.abs(one.xMm))));
-			expect(last, key).toBe(Math.max(...bolts.map((one) => Math.abs(one.xMm))));
-			expect(at(printedOrder[0] ?? '').yMm * at(printedOrder[1] ?? '').yMm, key).toBeLessThan(0);
-		}
-	});
-
 	it('says of every value that it is invented', () => {
 		for (const one of [...sheet.dimensions, ...sheet.fasteners])
 			expect(one.source).toContain('invented for teaching');
@@ -115,16 +28,288 @@ describe.each(engines.map((sheet) => [sheet.code, sheet] as const))('data sheet 
 });
 
 it('names the engines by what they sweep', () => {
-	const sweeps = { 'av3-1150': 3, 'av4-2200d': 4 };
-	for (const [key, cylinders] of Object.entries(sweeps)) {
+	const swept = (key: string) => {
 		const sheet = engines.find((one) => one.key === key);
-		if (!sheet) throw new Error(`no sheet ${key}`);
-		const bore = dimensionOf(sheet, 'cylinder.bore')?.nominal ?? NaN;
-		const stroke = dimensionOf(sheet, 'crankshaft.stroke')?.nominal ?? NaN;
-		const named = Number(/-(\d+)/.exec(sheet.code)?.[1]);
-		expect(Math.abs(displacementCm3(bore, stroke, cylinders) - named)).toBeLessThan(5);
-	}
+		const nominal = (of: string) => (sheet && dimensionOf(sheet, of)?.nominal) ?? NaN;
+		return displacementCm3(
+			nominal('cylinder.bore'),
+			nominal('crankshaft.stroke'),
+			sheet?.layout?.cylinders ?? 1
+		);
+	};
+	expect(Math.abs(swept('av3-1150') - 1150)).toBeLessThan(5);
+	expect(Math.abs(swept('av4-2200d') - 2200)).toBeLessThan(5);
+});
+
+/** A copy of the petrol engine's sheet with one thing changed. */
+function changed(change: (sheet: DataSheet) => void): DataSheet {
 	const av3 = engines.find((one) => one.key === 'av3-1150');
-	expect(av3 && fastenerOf(av3, 'crankpin.rodBolt')?.yieldTightened).toBe(true);
-	expect(av3 && patternOf(av3, 'head.bolts')?.bolts).toHaveLength(8);
+	if (!av3) throw new Error('no AV3-1150');
+	const copy = structuredClone(av3);
+	change(copy);
+	return copy;
+}
+const size = (sheet: DataSheet, key: string): Dimension => {
+	const found = dimensionOf(sheet, key);
+	if (!found) throw new Error(`no ${key}`);
+	return found;
+};
+const bolt = (sheet: DataSheet, key: string): Fastener => {
+	const found = fastenerOf(sheet, key);
+	if (!found) throw new Error(`no ${key}`);
+	return found;
+};
+const pattern = (sheet: DataSheet, at = 0) => {
+	const found = sheet.patterns[at];
+	if (!found) throw new Error('no pattern');
+	return found;
+};
+
+describe('a faulty sheet', () => {
+	it.each([
+		[
+			'refused',
+			'crankpin.diameter',
+			'lies above the most',
+			(s: DataSheet) => (size(s, 'crankpin.diameter').build = { least: 40, most: 39.9 })
+		],
+		[
+			'refused',
+			'crankpin.diameter',
+			'already be past its wear limit',
+			(s: DataSheet) => (size(s, 'crankpin.diameter').runAgain = { least: 39.99 })
+		],
+		[
+			'refused',
+			'cylinder.bore',
+			'already be past its wear limit',
+			(s: DataSheet) => (size(s, 'cylinder.bore').runAgain = { most: 74.01 })
+		],
+		[
+			'refused',
+			'cylinder.bore',
+			'to run again, the least',
+			(s: DataSheet) => (size(s, 'cylinder.bore').runAgain = { least: 74.3, most: 74.2 })
+		],
+		[
+			'warned',
+			'cylinder.bore',
+			'outside its build limits',
+			(s: DataSheet) => (size(s, 'cylinder.bore').nominal = 75)
+		],
+		[
+			'refused',
+			'crankpin.oilClearance',
+			'mark it as selectively fitted',
+			(s: DataSheet) => (size(s, 'crankpin.oilClearance').build = { least: 0.025, most: 0.04 })
+		],
+		[
+			'warned',
+			'crankpin.oilClearance',
+			'can never be met',
+			(s: DataSheet) => (size(s, 'crankpin.oilClearance').build = { least: 0.01, most: 0.06 })
+		],
+		[
+			'refused',
+			'crankpin.oilClearance',
+			'no pair of parts can have it',
+			(s: DataSheet) => (size(s, 'crankpin.oilClearance').build = { least: 0.1, most: 0.12 })
+		],
+		[
+			'refused',
+			'mainJournal.bearingBore',
+			'housing less two shells',
+			(s: DataSheet) => (size(s, 'mainJournal.housingBore').build = { least: 52.1, most: 52.11 })
+		],
+		[
+			'refused',
+			'mainJournal.capBolt',
+			'past its proof load',
+			(s: DataSheet) => (bolt(s, 'mainJournal.capBolt').stages = [{ torqueNm: 90 }])
+		],
+		[
+			'warned',
+			'mainJournal.capBolt',
+			'and used again',
+			(s: DataSheet) => (bolt(s, 'mainJournal.capBolt').stages = [{ torqueNm: 70 }])
+		],
+		[
+			'refused',
+			'mainJournal.capBolt',
+			'no more than the one before',
+			(s: DataSheet) =>
+				(bolt(s, 'mainJournal.capBolt').stages = [{ torqueNm: 50 }, { torqueNm: 25 }])
+		],
+		[
+			'refused',
+			'head.bolt',
+			'is not yield-tightened',
+			(s: DataSheet) => (bolt(s, 'head.bolt').stages = [{ torqueNm: 30 }, { angleDeg: 20 }])
+		],
+		[
+			'refused',
+			'head.bolt',
+			'too far for one use',
+			(s: DataSheet) =>
+				(bolt(s, 'head.bolt').stages = [{ torqueNm: 30 }, { angleDeg: 360 }, { angleDeg: 180 }])
+		],
+		[
+			'refused',
+			'head.bolt',
+			'yet “use again”',
+			(s: DataSheet) => (bolt(s, 'head.bolt').reuse = 'use again')
+		],
+		[
+			'warned',
+			'head.bolt',
+			'its stretched length is not given',
+			(s: DataSheet) => delete bolt(s, 'head.bolt').gripMm
+		],
+		[
+			'refused',
+			'head.bolts',
+			'stand in one place',
+			(s: DataSheet) => Object.assign(pattern(s).bolts[1] ?? {}, { xMm: -129, yMm: 45.4 })
+		],
+		[
+			'refused',
+			'head.bolts',
+			'leaves out',
+			(s: DataSheet) => (pattern(s).printedOrder = ['A2', 'B3'])
+		],
+		[
+			'refused',
+			'layout',
+			'stands twice',
+			(s: DataSheet) => (s.layout = s.layout && { ...s.layout, firingOrder: [1, 3, 3] })
+		],
+		[
+			'refused',
+			'cylinder.compressionRatio',
+			'is printed',
+			(s: DataSheet) => (size(s, 'cylinder.clearanceVolume').nominal = 60)
+		],
+		[
+			'refused',
+			'piston.oversizes',
+			'do not rise',
+			(s: DataSheet) => Object.assign(s.oversizes[0] ?? {}, { stepsMm: [0.5, 0.25] })
+		],
+		[
+			'warned',
+			'piston.oversizes',
+			'would not clean up',
+			(s: DataSheet) => Object.assign(s.oversizes[0] ?? {}, { stepsMm: [0.05, 0.25] })
+		],
+		[
+			'warned',
+			'title',
+			'the title says',
+			(s: DataSheet) => (s.title = 'three-cylinder petrol engine, 1300 cm³')
+		],
+		[
+			'warned',
+			'oil.gallery',
+			'where no way of the oil arrives',
+			(s: DataSheet) =>
+				Object.assign(s.ports.find((one) => one.key === 'oil.gallery') ?? {}, { from: 'Nowhere' })
+		],
+		[
+			'warned',
+			'valve.shims',
+			'no whole number of steps',
+			(s: DataSheet) => Object.assign(s.shims[0] ?? {}, { stepMm: 0.07 })
+		],
+		[
+			'warned',
+			'crankpin.oilClearance',
+			'no fit says',
+			(s: DataSheet) => (s.fits = s.fits.slice(1))
+		],
+		[
+			'warned',
+			'cylinder.bore',
+			'no page in it',
+			(s: DataSheet) => (size(s, 'cylinder.bore').source = 'shop manual')
+		]
+	])('%s at %s: %s', (severity, at, says, change) => {
+		const found = checkSheet(changed(change)).filter((one) => one.at === at);
+		expect(found.map((one) => one.severity)).toContain(severity);
+		expect(found.map((one) => one.says).join('\n')).toContain(says);
+	});
+	it('whose parts are chosen for each other may print a closer clearance than their limits give', () => {
+		const sheet = changed((s) => {
+			size(s, 'crankpin.oilClearance').build = { least: 0.025, most: 0.04 };
+			s.fits = s.fits.map((one) =>
+				one.clearance === 'crankpin.oilClearance' ? { ...one, selective: true } : one
+			);
+		});
+		expect(checkSheet(sheet)).toEqual([]);
+	});
+	it('puts what is refused before what is only warned of', () => {
+		const found = checkSheet(
+			changed((s) => {
+				s.title = 'an engine of 1300 cm³';
+				bolt(s, 'head.bolt').reuse = 'use again';
+			})
+		);
+		expect(found.map((one) => one.severity)).toEqual(['refused', 'warned']);
+	});
+});
+
+describe('the form of a sheet', () => {
+	const plain = () =>
+		JSON.parse(JSON.stringify(changed(() => undefined))) as Record<string, unknown>;
+	it.each([
+		[
+			'a fit of a size that is not there',
+			{
+				fits: [
+					{
+						clearance: 'crankpin.oilClearance',
+						outer: 'crankpin.nothing',
+						inner: 'crankpin.diameter'
+					}
+				]
+			},
+			'crankpin.nothing'
+		],
+		[
+			'an oversize of nothing',
+			{
+				oversizes: [
+					{
+						key: 'piston.oversizes',
+						words: 'x',
+						of: 'cylinder.nothing',
+						kind: 'oversize',
+						stepsMm: [0.5],
+						source: 'x'
+					}
+				]
+			},
+			'cylinder.nothing'
+		],
+		[
+			'a weak point of no family',
+			{
+				weakPoints: [
+					{
+						key: 'oil.x',
+						words: 'x',
+						family: 'gearbox',
+						fails: 'x',
+						shows: 'x',
+						check: 'x',
+						source: 'x'
+					}
+				]
+			},
+			'gearbox'
+		],
+		['five values', { dimensions: [] }, 'Six values']
+	])('refuses %s', (_, change, says) => {
+		const parsed = dataSheetSchema.safeParse({ ...plain(), ...change });
+		expect(parsed.success ? '' : JSON.stringify(parsed.error.issues)).toContain(says);
+	});
 });
