@@ -11,9 +11,9 @@ export const cornerTwistParameters = z.strictObject({
 });
 
 /**
- * How far the four corners of a face on jacks lie from one plane. Corners read 0 to 0.25 mm, in
- * hundredths; drawn again until the result lies between three tenths of the limit to run again and
- * twice of it.
+ * How far the four corners of a face on jacks lie from one plane. Corners read 0.30 to 0.55 mm, in
+ * hundredths, so that no reading is the answer; drawn again until the result lies between three
+ * tenths of the limit to run again and twice of it.
  */
 export const cornerTwist = sumOf({
 	calculator: flatness,
@@ -27,10 +27,10 @@ export const cornerTwist = sumOf({
 		if (unit !== 'mm' || limit === undefined) return cannot(`${words} has no limit in millimetres`);
 		for (let tries = 0; tries < 200; tries++) {
 			const [a = 0, b = 0, c = 0, d = 0] = [1, 2, 3, 4].map(() =>
-				shown(random.integer(0, 25) / 100, 2)
+				shown(random.integer(30, 55) / 100, 2)
 			);
 			const twist = Math.abs(a + d - b - c) / 2;
-			if (twist < 0.3 * limit || twist > 2 * limit) continue;
+			if (twist < 0.3 * limit || twist > 2 * limit || twist >= 0.3) continue;
 			const at = (where: string, value: number) => ({
 				words: `Dial, ${where} corner`,
 				value,

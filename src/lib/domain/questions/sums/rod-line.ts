@@ -13,7 +13,8 @@ export const rodLineParameters = z.strictObject({
 /**
  * Bend or twist of a rod from a dial over its mandrels, in 100 mm. Readings in hundredths: the
  * small end rises by 0.02 to 0.12 mm, the big end by up to 0.04 mm to the same side and always by
- * at least 0.01 mm less, over 80 to 160 mm.
+ * at least 0.01 mm less, over 80 to 160 mm. The dial was set down with 0.20 to 0.40 mm on it, so
+ * that no reading is the answer.
  */
 export const rodLine = sumOf({
 	calculator: rod,
@@ -28,8 +29,8 @@ export const rodLine = sumOf({
 			const [low, high] = [shown(from / 100, 2), shown((from + steps) / 100, 2)];
 			return farHigh ? [low, high] : [high, low];
 		};
-		const small = over(rise, random.integer(0, 5));
-		const big = bigEnd ? over(less, random.integer(0, 5)) : [null, null];
+		const small = over(rise, random.integer(20, 40));
+		const big = bigEnd ? over(less, random.integer(20, 40)) : [null, null];
 		const level = [0, 0];
 		const none = [null, null];
 		const mm = { unit: 'mm', decimals: 2 };

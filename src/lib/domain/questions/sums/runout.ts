@@ -16,7 +16,7 @@ export const runoutParameters = z.strictObject({
 /**
  * A shaft turned under a dial of 0.002 mm: a middle off its axis by up to the limit to run again,
  * with a little out-of-round. Drawn again until the runout lies between three tenths of that limit
- * and twice of it. The lowest reading is zero, as the dial was set.
+ * and twice of it. The dial was set down with 0.30 to 0.60 mm on it, so that no reading is the answer.
  */
 export const runout = sumOf({
 	calculator,
@@ -38,10 +38,16 @@ export const runout = sumOf({
 				const read = off * Math.cos(turned - high) + shape * Math.cos(2 * (turned - lobe));
 				return Math.round(read / 0.002);
 			});
-			const lowest = Math.min(...steps);
-			const reads = steps.map((one) => shown((one - lowest) * 0.002, 3));
+			const setDown = random.integer(150, 300) - Math.min(...steps);
+			const reads = steps.map((one) => shown((one + setDown) * 0.002, 3));
 			const travel = runoutMm(reads);
-			if (!travel.ok || travel.value < 0.3 * limit || travel.value > 2 * limit) continue;
+			if (
+				!travel.ok ||
+				travel.value < 0.3 * limit ||
+				travel.value > 2 * limit ||
+				travel.value >= 0.3
+			)
+				continue;
 			return computed({
 				values: {
 					readings: reads.map((read) => ({ angle: null, read })),
