@@ -1,3 +1,7 @@
+import type { CylinderBarsDrawing } from './drawings/cylinder-bars';
+import type { CylinderVolumesDrawing } from './drawings/cylinder-volumes';
+import type { WrenchDrawing } from './drawings/wrench';
+import type { PatternOrderDrawing } from './drawings/pattern-order';
 import type { DeckDrawing } from './drawings/deck';
 import type { EndFloatDrawing } from './drawings/end-float';
 import type { FitDrawing } from './drawings/fit';
@@ -47,4 +51,8 @@ export type Drawing =
 	| GaugingThreadDrawing
 	| RingGapDrawing
 	| ShellChoiceDrawing
-	| ShellCrushDrawing;
+	| ShellCrushDrawing
+	| PatternOrderDrawing
+	| WrenchDrawing
+	| CylinderVolumesDrawing
+	| CylinderBarsDrawing;

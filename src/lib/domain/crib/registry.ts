@@ -22,6 +22,12 @@ import { ringGap } from './calculators/ring-gap';
 import { ringSideClearance } from './calculators/ring-side-clearance';
 import { deckHeight } from './calculators/deck-height';
 import { stemToGuide } from './calculators/stem-to-guide';
+import { tighteningOrder } from './calculators/tightening-order';
+import { extension } from './calculators/extension';
+import { compressionRatio } from './calculators/compression-ratio';
+import { liquidLock } from './calculators/liquid-lock';
+import { compressionTest } from './calculators/compression-test';
+import { leakDown } from './calculators/leak-down';
 import { valveShims } from './calculators/valve-shims';
 import { whichTool } from './calculators/which-tool';
 
@@ -31,6 +37,8 @@ export const calculators: readonly AnyCalculator[] = [
 	friction,
 	torqueAngle,
 	thread,
+	extension,
+	tighteningOrder,
 	bore,
 	journal,
 	oilClearance,
@@ -48,6 +56,10 @@ export const calculators: readonly AnyCalculator[] = [
 	valveShims,
 	runout,
 	temperature,
+	leakDown,
+	compressionTest,
+	liquidLock,
+	compressionRatio,
 	reading,
 	ruling,
 	whichTool,

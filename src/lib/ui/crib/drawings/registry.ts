@@ -12,6 +12,10 @@ import RingGap from './RingGap.svelte';
 import ShellChoice from './ShellChoice.svelte';
 import ShellCrush from './ShellCrush.svelte';
 import GridSection from './GridSection.svelte';
+import PatternOrder from './PatternOrder.svelte';
+import Wrench from './Wrench.svelte';
+import CylinderVolumes from './CylinderVolumes.svelte';
+import CylinderBars from './CylinderBars.svelte';
 import Budget from './Budget.svelte';
 import Clearance from './Clearance.svelte';
 import Conformance from './Conformance.svelte';
@@ -48,7 +52,11 @@ const components: Drawn = {
 	'gauging-thread': GaugingThread,
 	'ring-gap': RingGap,
 	'shell-choice': ShellChoice,
-	'shell-crush': ShellCrush
+	'shell-crush': ShellCrush,
+	'pattern-order': PatternOrder,
+	wrench: Wrench,
+	'cylinder-volumes': CylinderVolumes,
+	'cylinder-bars': CylinderBars
 };
 
 export function drawingComponent(kind: Drawing['kind']): Component<{ drawing: Drawing }> {
