@@ -74,7 +74,12 @@ export function gridWorked(part: Part, asked: GridAsked): Outcome<Worked> {
 			...wear.value.lines,
 			...next.lines
 		],
-		working: [...shown.working, ...wear.value.working, ...next.working],
+		working: [
+			...shown.working,
+			...wear.value.working,
+			...next.working,
+			...differenceStep(asked.uncertainty, differenceU, rulings.value.length > 0)
+		],
 		rulings: rulings.value,
 		notes: shown.notes,
 		drawing: {
@@ -171,6 +176,24 @@ function wearShown(
 			}
 		]
 	});
+}
+
+function differenceStep(
+	reading: number | undefined,
+	difference: number | undefined,
+	isRuled: boolean
+): Step[] {
+	if (reading === undefined || difference === undefined || !isRuled) return [];
+	return [
+		{
+			words: 'Uncertainty of a difference of two readings: both count',
+			rule: 'U = U1 · √(1² + 1²)',
+			formula: `${figure(reading, 4)} · √(1² + 1²)`,
+			value: difference,
+			unit: 'mm',
+			decimals: 4
+		}
+	];
 }
 
 function spreadHeld(
