@@ -48,7 +48,8 @@ export function keyFromWords(words: string, family?: string): string {
 	return family === undefined ? name : `${family}.${name}`;
 }
 
-function lastSource(draft: SheetDraft, section: RowSection): string | undefined {
+/** The source that was named last in this section, or of a dimension. */
+export function lastSource(draft: SheetDraft, section: RowSection): string | undefined {
 	if (
 		section === 'partFamilies' ||
 		section === 'fits' ||

@@ -1,12 +1,15 @@
 import { unitWords } from '../unit-words';
+import type { SheetDraft } from './draft';
 import type { RowSection } from './sections';
 
 type Values = Readonly<Record<string, string>>;
 
-/** What a row is called in a list, as far as it is typed. */
-export function rowTitle(section: RowSection, values: Values): string {
-	const named = section === 'fits' ? values.clearance : values.words;
-	return named?.trim() || 'Not named yet';
+/** What a row is called in a list, as far as it is typed; a fit by the clearance that it gives. */
+export function rowTitle(section: RowSection, values: Values, draft?: SheetDraft): string {
+	const { clearance = '', words = '' } = values;
+	const gap = draft?.rows.dimensions.find((one) => one.values.key === clearance)?.values.words;
+	const named = section === 'fits' ? (gap ?? clearance) : words;
+	return named.trim() || 'Not named yet';
 }
 
 /** What a row says, in one line, as far as it is typed. */

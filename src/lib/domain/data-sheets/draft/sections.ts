@@ -14,7 +14,7 @@ export type Section = {
 
 const same = (value: string) => ({ value, words: value });
 const from = {
-	source: line('Source', 'source', { hint: 'Which manual, or whose measurement.' }),
+	source: line('Source: which manual, or whose measurement', 'source'),
 	page: line('Page', 'page', { short: true })
 };
 const key = line('Key', 'key', {
@@ -58,19 +58,19 @@ export const sections = {
 		fields: {
 			words,
 			nominal: figure('Nominal', 'nominal', 'row'),
-			least: figure('To build, least', 'build.least', 'row'),
-			most: figure('To build, most', 'build.most', 'row'),
-			wearLeast: figure('To run again, not below', 'runAgain.least', 'row'),
-			wearMost: figure('To run again, not above', 'runAgain.most', 'row'),
 			unit: choice(
 				'Unit',
 				'unit',
 				dimensionUnits.map((value) => ({ value, words: unitWords[value] || value }))
 			),
+			least: figure('To build, least', 'build.least', 'row'),
+			most: figure('To build, most', 'build.most', 'row'),
+			wearLeast: figure('To run again, not below', 'runAgain.least', 'row'),
+			wearMost: figure('To run again, not above', 'runAgain.most', 'row'),
+			...from,
 			decimals: choice('Decimals', 'decimals', ['0', '1', '2', '3', '4'].map(same), {
 				codec: whole
 			}),
-			...from,
 			note: line('Note', 'note'),
 			key
 		}
