@@ -1,6 +1,5 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { stepAfter } from '$lib/kernel/quantity/format-quantity';
 import { parseStages } from '$lib/kernel/quantity/parse-stages';
 import { readNumber } from '$lib/kernel/quantity/read-number';
 
@@ -54,23 +53,5 @@ describe('a bare figure', () => {
 		expect(readNumber('1,250', 'mm')).toEqual({ ok: true, value: 1.25 });
 		expect(readNumber('1 250,5')).toEqual({ ok: true, value: 1250.5 });
 		expect(readNumber('40 N').ok).toBe(false);
-	});
-});
-
-describe('the step after a conversion', () => {
-	it('is no coarser than what was read, and one of 1, 2, 5', () => {
-		fc.assert(
-			fc.property(
-				fc.constantFrom(1, 0.5, 0.1, 0.05, 0.02, 0.01, 0.002, 0.001),
-				fc.double({ min: 1e-3, max: 1e3, noNaN: true }),
-				(step, factor) => {
-					const after = stepAfter(step, factor);
-					expect(after).toBeLessThanOrEqual(step * factor * 1.000001);
-					expect(after * 2.5).toBeGreaterThanOrEqual(step * factor * 0.999999);
-					expect([1, 2, 5]).toContain(Number(after.toExponential().split('e')[0]));
-				}
-			)
-		);
-		expect(() => stepAfter(0, 1)).toThrow(RangeError);
 	});
 });

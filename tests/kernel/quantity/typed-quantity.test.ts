@@ -44,7 +44,10 @@ describe('a typed quantity', () => {
 		['-5 °C', 'temperature', -5, '°C'],
 		['68 F', 'temperature', 68, '°F'],
 		['120 hp', 'power', 120, 'hp'],
-		['60 PS', 'power', 60, 'PS']
+		['60 PS', 'power', 60, 'PS'],
+		['15.4 m/s', 'speed', 15.4, 'm/s'],
+		['2 990 fpm', 'speed', 2990, 'ft/min'],
+		['49.9 ft/sec', 'speed', 49.9, 'ft/s']
 	] as const)('%s is read', (typed, dimension, value, unit) => {
 		expect(parseQuantity(typed, dimension)).toEqual({ ok: true, value: { value, unit } });
 	});

@@ -25,24 +25,3 @@ function decimalsOf(step: number): number {
 	const written = digits.split('.')[1]?.length ?? 0;
 	return Math.min(20, Math.max(0, written - Number(power)));
 }
-
-/**
- * The step to print in after a conversion: the coarsest of the 1, 2, 5 series that is no coarser
- * than the instrument's own step, so that a converted figure claims no more than was read.
- *
- * @param step the instrument's step in its own unit, above zero
- * @param factor units of the new kind in one of the old, above zero
- * @returns the step in the new unit
- * @throws RangeError where either is no number above zero
- * Source: common practice of dual-unit scales, no source; the series is that of ISO 3 rounded.
- * @example stepAfter(0.01, 1 / 25.4) // 0.0002: a hundredth of a millimetre is 0.0004 in
- */
-export function stepAfter(step: number, factor: number): number {
-	const converted = step * factor;
-	if (!(converted > 0) || !Number.isFinite(converted))
-		throw new RangeError('a step and a factor above zero');
-	const power = Math.floor(Math.log10(converted) + 1e-9);
-	const lead = converted / 10 ** power;
-	const head = [5, 2, 1].find((one) => one <= lead + 1e-9) ?? 1;
-	return Number(`${head}e${power}`);
-}

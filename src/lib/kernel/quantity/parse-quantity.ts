@@ -74,5 +74,6 @@ const dimensionWords: Record<DimensionName, string> = {
 	angle: 'angle',
 	temperature: 'temperature',
 	temperatureDifference: 'a difference of temperature',
-	power: 'power'
+	power: 'power',
+	speed: 'speed'
 };

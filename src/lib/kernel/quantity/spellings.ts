@@ -74,5 +74,10 @@ export const spellings: { readonly [D in DimensionName]: readonly Spelling<D>[] 
 		[/^w(atts?)?$/i, 'W'],
 		[/^(hp|bhp|horsepower)$/i, 'hp'],
 		[/^(ps|metric (hp|horsepower))$/i, 'PS']
+	],
+	speed: [
+		[/^m\/s(ec)?$/i, 'm/s'],
+		[/^((ft|feet)\/min|fpm)$/i, 'ft/min'],
+		[/^((ft|feet)\/s(ec)?|fps)$/i, 'ft/s']
 	]
 };

@@ -1,5 +1,5 @@
 /**
- * Factors to the unit used inside (mm, N·m, N, MPa, cm³, °, °C, kW). Exact wherever the definition
+ * Factors to the unit used inside (mm, N·m, N, MPa, cm³, °, °C, kW, m/s). Exact wherever the definition
  * makes it so.
  * Source: NIST SP 811 (2008), appendix B.8 and B.9; inch 25.4 mm, pound 0.45359237 kg, standard
  * gravity 9.80665 m/s², US gallon 231 in³ and the conventional mercury of 13 595.1 kg/m³ are exact
@@ -54,6 +54,9 @@ export const powerKw = {
 	PS: (75 * 9.80665) / 1000
 } as const;
 
+/** Of a piston: the inch trade writes it a minute. */
+export const speedMPerS = { 'm/s': 1, 'ft/min': 0.3048 / 60, 'ft/s': 0.3048 } as const;
+
 export const dimensions = {
 	length: lengthMm,
 	torque: torqueNm,
@@ -63,7 +66,8 @@ export const dimensions = {
 	angle: angleDeg,
 	temperature: temperatureC,
 	temperatureDifference: temperatureDifferenceK,
-	power: powerKw
+	power: powerKw,
+	speed: speedMPerS
 } as const;
 export type DimensionName = keyof typeof dimensions;
 export type UnitOf<D extends DimensionName> = keyof (typeof dimensions)[D] & string;
