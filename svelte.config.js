@@ -2,6 +2,7 @@ import adapter from '@sveltejs/adapter-node';
 import { vitePreprocess } from '@sveltejs/vite-plugin-svelte';
 import { mdsvex } from 'mdsvex';
 import mdsvexConfig from './mdsvex.config.js';
+import { lessonValues } from './src/bin/lesson-values.js';
 
 /**
  * mdsvex still writes Svelte 4 idioms into what it compiles; runes mode refuses `$$props`
@@ -23,7 +24,7 @@ const runesReady = {
 /** @type {import('@sveltejs/kit').Config} */
 const config = {
 	extensions: ['.svelte', '.svx'],
-	preprocess: [vitePreprocess(), mdsvex(mdsvexConfig), runesReady],
+	preprocess: [lessonValues, vitePreprocess(), mdsvex(mdsvexConfig), runesReady],
 	kit: {
 		adapter: adapter({ out: process.env.RINGLAND_BUILD_OUT ?? 'build', precompress: true }),
 		alias: { $lessons: 'lessons' },

@@ -119,8 +119,7 @@ export const numberWithUnit: Kind<NumberWithUnitBody, Drawn, NumberFace, NumberR
 	score(body, { expected }, response) {
 		const read = readNumber(response.value, response.unit);
 		const wrong = (explain: string) => ({ points: 0, right: false, explain });
-		if (!read.ok)
-			return wrong(`“${response.value}” cannot be read as a number: ${read.because}.`);
+		if (!read.ok) return wrong(`“${response.value}” cannot be read as a number: ${read.because}.`);
 		const value = read.value;
 		const margin = allowed(body, expected.value) + 1e-9;
 		if (!unitsFor(expected.unit).includes(response.unit))
