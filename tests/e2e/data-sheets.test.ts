@@ -20,7 +20,7 @@ test('an instructor changes a wear limit, sees what it touches, and publishes', 
 }) => {
 	const page = await as('instructor@averholm.example');
 	await page.goto('/s/averholm/data-sheets');
-	await page.getByRole('link', { name: 'AV3-1150' }).click();
+	await page.getByRole('link', { name: 'AV3-1150', exact: true }).click();
 	await page.getByRole('link', { name: 'Change it' }).click();
 	await page.getByRole('button', { name: 'Begin a draft' }).click();
 	await expect(saved(page)).toBeVisible();

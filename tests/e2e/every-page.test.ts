@@ -17,7 +17,10 @@ const ofEachShape = 2;
 const shapeOf = (path: string) =>
 	path
 		.replace(/[0-9A-HJKMNP-TV-Z]{26}/g, ':id')
-		.replace(/(lessons|job-sheets|quizzes)\/.*/, '$1/:step');
+		.replace(/(lessons|job-sheets|quizzes)\/.*/, '$1/:step')
+		// Each calculator is walked by the crib's own test.
+		.replace(/\/crib\/.+/, '/crib/:calculator')
+		.replace(/(data-sheets\/)(?:\w+\/)?[a-z]+\d[\w-]*/, '$1:sheet');
 
 const linksOf = (page: Page) =>
 	page.locator('a[href]').evaluateAll((all) =>
