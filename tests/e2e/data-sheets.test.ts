@@ -24,7 +24,7 @@ test('an instructor changes a wear limit, sees what it touches, and publishes', 
 	await page.getByRole('link', { name: 'Change it' }).click();
 	await page.getByRole('button', { name: 'Begin a draft' }).click();
 	await expect(saved(page)).toBeVisible();
-	await row(page, /^\+ Crankpin, oil clearance/).click();
+	await row(page, /^\+? ?Crankpin, oil clearance/).click();
 	const limit = page.getByLabel(/To run again, not above/);
 
 	await test.step('what cannot be right says so in its place', async () => {
@@ -43,9 +43,9 @@ test('an instructor changes a wear limit, sees what it touches, and publishes', 
 
 	const main = page.locator('main');
 	await expect(main.getByRole('heading', { name: 'Publish revision D of AV3-1150' })).toBeVisible();
-	await expect(main.getByText('Crankpins and clearances')).toBeVisible();
+	await expect(main.getByText('Crankpins and clearances').first()).toBeVisible();
 	await expect(main.getByRole('heading', { name: /^Questions/ })).toBeVisible();
-	await expect(main.getByText('Crankpins and shells')).toBeVisible();
+	await expect(main.getByText('Crankpins and shells').first()).toBeVisible();
 	await expectAccessible(page);
 	await screenshots(page, 'publish');
 	for (const warning of await main.getByRole('checkbox').all()) await warning.check();
@@ -99,7 +99,7 @@ test('a sheet of the school’s own is made on a phone with six values', async (
 		['Crankpin, out-of-round', '', '0', '0.005']
 	] as const;
 	for (const [i, [words, nominal, least, most]] of six.entries()) {
-		const line = row(page, new RegExp(`^[+−] ${words}`));
+		const line = row(page, new RegExp(`^[+−]? ?${words}`));
 		if ((await line.getAttribute('aria-expanded')) === 'false') await line.click();
 		const open = page.getByRole('listitem').filter({ has: line });
 		await open.getByLabel('Nominal').fill(nominal);
