@@ -190,7 +190,7 @@ export const friction = calculator({
 							'More than 90 % of yield while the wrench turns it: the thread’s torsion comes on top of the pull.'
 						]
 					: [],
-			drawing: { kind: 'torque-shares', torqueNm, shares }
+			drawing: { kind: 'torque-shares', torqueNm, preloadN: load.value, shares }
 		});
 	},
 	presets: (sheet) =>

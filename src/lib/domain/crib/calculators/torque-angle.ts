@@ -189,7 +189,8 @@ export const torqueAngle = calculator({
 				: [],
 			drawing: {
 				kind: 'torque-angle',
-				points,
+				lines: [points],
+				stagesDeg: [angle],
 				yieldN: loads.value.yieldN,
 				proofN: loads.value.proofN,
 				angleAtYieldDeg
