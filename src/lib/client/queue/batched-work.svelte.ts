@@ -26,10 +26,11 @@ const batchAtMost = 200;
  * version that it was sent under first, so that an answer that got lost is no conflict.
  */
 export class BatchedWork<Body, Operation> {
-	body = $state<Body>() as Body;
+	/** Never changed in place: every change gives a new one. */
+	body = $state.raw<Body>() as Body;
 	state = $state<SaveState>('saved');
 	detail = $state('');
-	conflict = $state<Conflict<Body> | null>(null);
+	conflict = $state.raw<Conflict<Body> | null>(null);
 	version = $state(0);
 	#pending: Operation[] = [];
 	#sending: Batch | null = null;

@@ -14,7 +14,7 @@ export type Section = {
 
 const same = (value: string) => ({ value, words: value });
 const from = {
-	source: line('Source: which manual, or whose measurement', 'source'),
+	source: line('Source', 'source', { hint: 'Which manual, or whose measurement.' }),
 	page: line('Page', 'page', { short: true })
 };
 const key = line('Key', 'key', {

@@ -1,37 +1,32 @@
-import type { SheetDraft } from './draft';
-import { headRow } from './draft';
+import { headRow, type SheetDraft } from './draft';
 import { fieldsOf, rowSections, type RowSection, type SectionName } from './sections';
 
 export type TypedChanges = {
 	/** What stood in a field before; undefined where it says the same now. */
 	was: (section: SectionName, row: string, field: string) => string | undefined;
 	isNew: (section: RowSection, row: string) => boolean;
-	/** Rows that stood in the sheet and do not stand in the draft any more. */
-	gone: { section: RowSection; words: string }[];
 };
 
 /** A draft against what it was begun from, field by field, also where it cannot be read yet. */
 export function typedChanges(before: SheetDraft, now: SheetDraft): TypedChanges {
-	const pairs = new Map<string, Values | undefined>([[`head/${headRow}`, before.head]]);
-	const gone: TypedChanges['gone'] = [];
+	const rows = new Map<string, { was: Values | undefined; now: Values }>();
+	rows.set(`head/${headRow}`, { was: before.head, now: now.head });
 	for (const section of rowSections) {
-		for (const row of now.rows[section])
-			pairs.set(`${section}/${row.id}`, twin(section, row.values, before.rows[section]));
-		for (const row of before.rows[section])
-			if (!twin(section, row.values, now.rows[section]))
-				gone.push({ section, words: row.values.words ?? nameOf(section, row.values) });
+		const named = new Map(
+			before.rows[section].map(({ values }) => [nameOf(section, values), values])
+		);
+		for (const { id, values } of now.rows[section])
+			rows.set(`${section}/${id}`, { was: named.get(nameOf(section, values)), now: values });
 	}
 	return {
 		was(section, row, field) {
-			const values = pairs.get(`${section}/${row}`);
-			const held =
-				section === 'head' ? now.head : now.rows[section].find((one) => one.id === row)?.values;
-			if (!values || !held) return undefined;
-			const text = values[field] ?? '';
-			return saysTheSame(section, field, text, held[field] ?? '', held.unit) ? undefined : text;
+			const pair = rows.get(`${section}/${row}`);
+			if (!pair?.was) return undefined;
+			const text = pair.was[field] ?? '';
+			const isSame = saysTheSame(section, field, text, pair.now[field] ?? '', pair.now.unit);
+			return isSame ? undefined : text;
 		},
-		isNew: (section, row) => pairs.get(`${section}/${row}`) === undefined,
-		gone
+		isNew: (section, row) => rows.get(`${section}/${row}`)?.was === undefined
 	};
 }
 
@@ -41,11 +36,6 @@ type Values = Readonly<Record<string, string>>;
 function nameOf(section: RowSection, values: Values): string {
 	const field = section === 'fits' ? 'clearance' : section === 'fluids' ? 'words' : 'key';
 	return (values[field] ?? '').trim();
-}
-
-function twin(section: RowSection, values: Values, among: readonly { values: Values }[]) {
-	const name = nameOf(section, values);
-	return among.find((one) => nameOf(section, one.values) === name)?.values;
 }
 
 /** "74.0" and "74,00" are one figure. */
