@@ -1,19 +1,21 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { compressionHeight, rodLength } from '$lib/kernel/cylinder/block-stack';
 import {
-	clearanceForCm3,
-	compressionRatio,
-	ratioOf,
-	solvePart,
-	type SolvedPart
-} from '$lib/kernel/cylinder/compression-ratio';
-import { compressionBalance, wetTest } from '$lib/kernel/cylinder/compression-test';
+	compressionHeight,
+	pistonDeck,
+	pistonToHeadMm,
+	rodLength
+} from '$lib/kernel/cylinder/block-stack';
+import { clearanceForCm3, compressionRatio, ratioOf } from '$lib/kernel/cylinder/compression-ratio';
+import { solvePart, type SolvedPart } from '$lib/kernel/cylinder/solve-part';
+import { compressionBalance } from '$lib/kernel/cylinder/compression-test';
+import { discHeightMm, discVolumeCm3 } from '$lib/kernel/cylinder/disc-volume';
 import { companions, firingsOf } from '$lib/kernel/cylinder/firing';
 import { leakBand, leakPercent } from '$lib/kernel/cylinder/leak-down';
 import { crankAngleAtDeg, liquidLock, pistonBelowTdcMm } from '$lib/kernel/cylinder/liquid-lock';
 import { bucklingOf } from '$lib/kernel/cylinder/rod-buckling';
 import { pistonForceN, pressureForForceMPa } from '$lib/kernel/cylinder/speed-and-power';
+import { wetTest } from '$lib/kernel/cylinder/wet-test';
 import type { Outcome } from '$lib/kernel/outcome';
 
 function value<T>(found: Outcome<T>): T {
@@ -41,7 +43,9 @@ describe('a compression ratio', () => {
 				(cylinder, parts, part, wanted) => {
 					const solved = solvePart(cylinder, parts, part, wanted);
 					fc.pre(solved.ok);
-					const again = value(compressionRatio(cylinder, { ...parts, [part]: value(solved) }));
+					const again = value(
+						compressionRatio(cylinder, { ...parts, [part]: value(solved).value })
+					);
 					expect(again.ratio / wanted).toBeCloseTo(1, 8);
 				}
 			)
@@ -165,6 +169,34 @@ describe('a piston and its crank', () => {
 		);
 		expect(rodLength({ blockHeight: 50, deck: 0, stroke: 100 }, 30)).toMatchObject({ ok: false });
 	});
+	it('stand where block, piston, rod and crank put them, and as far from the head as the gasket leaves', () => {
+		fc.assert(
+			fc.property(
+				number(60, 100),
+				number(25, 45),
+				number(120, 160),
+				number(-1, 1),
+				(s, h, l, d) => {
+					const blockHeight = d + h + l + s / 2;
+					const deck = value(pistonDeck({ blockHeight, compressionHeight: h, rod: l, stroke: s }));
+					expect(deck).toBeCloseTo(d, 9);
+					expect(value(rodLength({ blockHeight, deck, stroke: s }, h))).toBeCloseTo(l, 9);
+				}
+			)
+		);
+		expect(value(pistonToHeadMm(1.2, -0.45))).toBeCloseTo(0.75, 9);
+		expect(pistonToHeadMm(-1, 0)).toMatchObject({ ok: false });
+	});
+	it('a flat space has one height for its volume', () => {
+		fc.assert(
+			fc.property(number(-50, 50), number(40, 150), (height, diameter) => {
+				expect(value(discHeightMm(value(discVolumeCm3(diameter, height)), diameter))).toBeCloseTo(
+					height,
+					9
+				);
+			})
+		);
+	});
 	it('a rod gives way at the same load by both rules where they meet, sooner the longer it is', () => {
 		const rod = { areaMm2: 250, yieldMPa: 550, modulusMPa: 206_000 };
 		const { transition } = value(bucklingOf({ ...rod, slenderness: 10 }));
@@ -282,12 +314,9 @@ describe('tests of a cylinder', () => {
 					pistonForceN(a, b),
 					pressureForForceMPa(a, b),
 					leakPercent(a, b),
-					solvePart(
-						{ boreMm: a, strokeMm: b },
-						{ chamberCm3: c, gasketBoreMm: d, gasketMm: e, deckMm: a, crownCm3: b },
-						'deckMm',
-						c
-					)
+					discHeightMm(a, b),
+					pistonToHeadMm(a, b),
+					pistonDeck({ blockHeight: a, compressionHeight: b, rod: c, stroke: d })
 				])
 					expect(found.ok ? Number.isFinite(found.value) : found.because !== '').toBe(true);
 				const ratio = compressionRatio(
@@ -295,6 +324,9 @@ describe('tests of a cylinder', () => {
 					{ chamberCm3: c, gasketBoreMm: d, gasketMm: e, deckMm: a, crownCm3: b }
 				);
 				if (ratio.ok) expect(Number.isFinite(ratio.value.ratio)).toBe(true);
+				const parts = { chamberCm3: c, gasketBoreMm: d, gasketMm: e, deckMm: a, crownCm3: b };
+				const solved = solvePart({ boreMm: a, strokeMm: b }, parts, 'deckMm', c);
+				if (solved.ok) expect(Object.values(solved.value).every(Number.isFinite)).toBe(true);
 				const lock = liquidLock(a, b, c);
 				if (lock.ok) expect(Number.isFinite(lock.value.belowTdcMm + lock.value.roomCm3)).toBe(true);
 				const rod = bucklingOf({ areaMm2: a, slenderness: b, yieldMPa: c, modulusMPa: d });

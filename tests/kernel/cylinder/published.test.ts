@@ -1,13 +1,10 @@
 import { describe, expect, it } from 'vitest';
 import { compressionHeight, rodLength } from '$lib/kernel/cylinder/block-stack';
-import {
-	clearanceForCm3,
-	compressionRatio,
-	ratioOf,
-	solvePart
-} from '$lib/kernel/cylinder/compression-ratio';
+import { clearanceForCm3, compressionRatio, ratioOf } from '$lib/kernel/cylinder/compression-ratio';
+import { solvePart } from '$lib/kernel/cylinder/solve-part';
 import { compressionBalance } from '$lib/kernel/cylinder/compression-test';
 import { discVolumeCm3 } from '$lib/kernel/cylinder/disc-volume';
+import { evenThrowsDeg } from '$lib/kernel/cylinder/crank-throws';
 import { displacementCm3 } from '$lib/kernel/cylinder/displacement';
 import { companions, evenIntervalDeg, firingsOf } from '$lib/kernel/cylinder/firing';
 import {
@@ -16,8 +13,10 @@ import {
 	leakPercent,
 	vacuumDropInHg
 } from '$lib/kernel/cylinder/leak-down';
+import { printedLeakLimits } from '$lib/kernel/cylinder/leak-ways';
 import { liquidLock } from '$lib/kernel/cylinder/liquid-lock';
 import { bucklingOf, roundSlenderness } from '$lib/kernel/cylinder/rod-buckling';
+import { skimmedChamberCm3 } from '$lib/kernel/cylinder/skimming';
 import {
 	meanPistonSpeedMPerS,
 	pistonForceN,
@@ -58,7 +57,7 @@ function cylinderAnswer(entry: Worked): number {
 				deckMm: height(of('k')),
 				crownCm3: 0
 			};
-			return value(solvePart(cylinder, parts, 'crownCm3', of('CR')));
+			return value(solvePart(cylinder, parts, 'crownCm3', of('CR'))).value;
 		},
 		D05: () => (value(meanPistonSpeedMPerS(of('S') * 304.8, of('N'))) * 60) / 0.3048,
 		D07: () =>
@@ -85,8 +84,7 @@ function cylinderAnswer(entry: Worked): number {
 			};
 			return value(compressionRatio(cylinder, parts)).ratio;
 		},
-		// cm² times mm over ten is cm³: what skimming takes from the chamber.
-		D20: () => value(ratioOf(of('Vs'), of('Vc') - (of('A') * of('c')) / 10)),
+		D20: () => value(ratioOf(of('Vs'), value(skimmedChamberCm3(of('Vc'), of('A'), of('c'))))),
 		D23: () => {
 			const before = value(clearanceForCm3(of('Vs'), of('CR')));
 			return value(ratioOf(of('Vs'), before + value(discVolumeCm3(of('B'), of('x')))));
@@ -146,6 +144,22 @@ describe('firing orders, published', () => {
 			for (const one of found) expect(one.toNextDeg).toBeCloseTo(720 / order.length, 9);
 		}
 	);
+	it.each(entries.filter(([, { id }]) => id === 'F14' || id === 'F15'))(
+		'%s: each is fired evenly on a crank of its own',
+		(_, { expected }) => {
+			const cranks = (expected as unknown as number[][]).map((order) => {
+				const throws = value(evenThrowsDeg(order, 'four-stroke'));
+				for (const one of value(firingsOf(throws, order, 'four-stroke')))
+					expect(one.toNextDeg).toBeCloseTo(720 / order.length, 9);
+				return throws;
+			});
+			expect(cranks[0]).not.toEqual(cranks[1]);
+		}
+	);
+	it('F14 an in-line three has throws at thirds of a turn, and its two orders mirror each other', () => {
+		expect(value(evenThrowsDeg([1, 2, 3], 'four-stroke'))).toEqual([0, 240, 120]);
+		expect(value(evenThrowsDeg([1, 3, 2], 'four-stroke'))).toEqual([0, 120, 240]);
+	});
 	it.each(entries.filter(([, { id }]) => id === 'F16' || id === 'F17'))(
 		'%s',
 		(_, { id, expected }) => {
@@ -181,12 +195,23 @@ function testAnswer(entry: Worked): number {
 					)
 				).allowedBar
 			),
+		C06: () =>
+			psi(value(compressionBalance([bar(of('high')), bar(of('high'))], '10-psi-apart')).allowedBar),
+		C07: () =>
+			psi(
+				value(compressionBalance([bar(of('high')), bar(of('high'))], '100-psi-apart')).allowedBar
+			),
 		// The line of the differential test is the share held at which a cylinder becomes suspect.
 		C10: () => {
 			const suspect = [...Array(81).keys()].filter(
 				(held) => value(leakBand(value(leakPercent(of('p'), held)))).suspect
 			);
 			return Math.max(...suspect) + 1;
+		},
+		C15: () => {
+			expect(printedLeakLimits.total).toBe(of('total'));
+			expect(printedLeakLimits['piston-and-rings']).toBe(of('rings'));
+			return printedLeakLimits['valves-and-gasket'];
 		},
 		C12: () => value(leakPercent(of('p'), of('c'))),
 		C18: () =>

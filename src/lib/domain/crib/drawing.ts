@@ -1,3 +1,7 @@
+import type { BoreAndStrokeDrawing } from './drawings/bore-and-stroke';
+import type { LiquidLockDrawing } from './drawings/liquid-lock';
+import type { FiringDrawing } from './drawings/firing';
+import type { DualScaleDrawing } from './drawings/dual-scale';
 import type { CylinderBarsDrawing } from './drawings/cylinder-bars';
 import type { CylinderVolumesDrawing } from './drawings/cylinder-volumes';
 import type { WrenchDrawing } from './drawings/wrench';
@@ -55,4 +59,8 @@ export type Drawing =
 	| PatternOrderDrawing
 	| WrenchDrawing
 	| CylinderVolumesDrawing
+	| BoreAndStrokeDrawing
+	| LiquidLockDrawing
+	| FiringDrawing
+	| DualScaleDrawing
 	| CylinderBarsDrawing;

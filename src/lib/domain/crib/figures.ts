@@ -15,7 +15,8 @@ const others: Record<string, Other> = {
 	MPa: { dimension: 'pressure', unit: 'psi', moreDecimals: -2 },
 	'cm³': { dimension: 'volume', unit: 'in³', moreDecimals: 1 },
 	'°C': { dimension: 'temperature', unit: '°F', moreDecimals: 0 },
-	kW: { dimension: 'power', unit: 'hp', moreDecimals: 0 }
+	kW: { dimension: 'power', unit: 'hp', moreDecimals: 0 },
+	'm/s': { dimension: 'speed', unit: 'ft/min', moreDecimals: -2 }
 };
 
 export type Figure = { figure: string; unit: string };

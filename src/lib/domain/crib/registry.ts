@@ -24,6 +24,9 @@ import { deckHeight } from './calculators/deck-height';
 import { stemToGuide } from './calculators/stem-to-guide';
 import { tighteningOrder } from './calculators/tightening-order';
 import { extension } from './calculators/extension';
+import { displacement } from './calculators/displacement';
+import { firing } from './calculators/firing';
+import { units } from './calculators/units';
 import { compressionRatio } from './calculators/compression-ratio';
 import { liquidLock } from './calculators/liquid-lock';
 import { compressionTest } from './calculators/compression-test';
@@ -57,13 +60,16 @@ export const calculators: readonly AnyCalculator[] = [
 	runout,
 	temperature,
 	leakDown,
+	firing,
 	compressionTest,
 	liquidLock,
+	displacement,
 	compressionRatio,
 	reading,
 	ruling,
 	whichTool,
-	groupStudy
+	groupStudy,
+	units
 ];
 
 export function calculatorNamed(key: string): AnyCalculator | undefined {

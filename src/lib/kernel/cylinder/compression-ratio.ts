@@ -65,7 +65,7 @@ export function clearanceForCm3(sweptCm3: number, ratio: number): Outcome<number
  *   gasketBoreMm: 104.14, gasketMm: 1.0414, deckMm: 0.254, crownCm3: 5 }) // 10.1
  */
 export function compressionRatio(cylinder: Cylinder, parts: ClearanceParts): Outcome<Ratio> {
-	const volumes = volumesOf(cylinder, parts);
+	const volumes = cylinderVolumes(cylinder, parts);
 	if (!volumes.ok) return volumes;
 	if (!(volumes.value.clearanceCm3 > 0))
 		return cannot('nothing is left above the piston: dome or deck fill the chamber');
@@ -73,8 +73,11 @@ export function compressionRatio(cylinder: Cylinder, parts: ClearanceParts): Out
 	return ratio.ok ? computed({ ratio: ratio.value, ...volumes.value }) : ratio;
 }
 
-/** Every volume of a cylinder; their sum may come out below zero. */
-function volumesOf(cylinder: Cylinder, parts: ClearanceParts): Outcome<Omit<Ratio, 'ratio'>> {
+/** Every volume of a cylinder, cm³; their sum may come out below zero. */
+export function cylinderVolumes(
+	cylinder: Cylinder,
+	parts: ClearanceParts
+): Outcome<Omit<Ratio, 'ratio'>> {
 	const { boreMm, strokeMm } = cylinder;
 	if (!(boreMm > 0) || !(strokeMm > 0) || boreMm > 5000 || strokeMm > 5000)
 		return cannot('bore and stroke are numbers above zero');
@@ -94,41 +97,4 @@ function volumesOf(cylinder: Cylinder, parts: ClearanceParts): Outcome<Omit<Rati
 		gasketCm3: gasket.value,
 		deckCm3: deck.value
 	});
-}
-
-export type SolvedPart = 'chamberCm3' | 'gasketMm' | 'deckMm' | 'crownCm3';
-
-/**
- * One part of a cylinder solved for a wanted ratio, the others as they are.
- *
- * Formula: part = Vs / (ε − 1) − all the others; a height = volume / (π/4 · D²).
- * @param cylinder bore and stroke, mm @param parts as they are; what stands for the part solved is not used
- * @param part which one @param ratio wanted ε, above 1
- * @returns cm³ for chamber and crown, mm for gasket and deck; a crown below zero is a dome, a deck
- *   below zero stands proud; "cannot" where a chamber or a gasket would be less than nothing
- * Source: definition; reference entry D04.
- * @example solvePart({ boreMm: 86, strokeMm: 86 }, parts, 'crownCm3', 10.5) // dish or dome, cm³
- */
-export function solvePart(
-	cylinder: Cylinder,
-	parts: ClearanceParts,
-	part: SolvedPart,
-	ratio: number
-): Outcome<number> {
-	const others = volumesOf(cylinder, { ...parts, [part]: 0 });
-	if (!others.ok) return others;
-	const wanted = clearanceForCm3(others.value.sweptCm3, ratio);
-	if (!wanted.ok) return wanted;
-	const leftCm3 = wanted.value - others.value.clearanceCm3;
-	if (part === 'crownCm3') return computedNumber(leftCm3);
-	if (part === 'chamberCm3')
-		return leftCm3 >= 0 ? computedNumber(leftCm3) : cannot(tooMuch('the other parts'));
-	const diameterMm = part === 'gasketMm' ? parts.gasketBoreMm : cylinder.boreMm;
-	const heightMm = (leftCm3 * 1000) / ((Math.PI / 4) * diameterMm ** 2);
-	if (part === 'gasketMm' && heightMm < 0) return cannot(tooMuch('the parts without a gasket'));
-	return computedNumber(heightMm);
-}
-
-function tooMuch(whose: string): string {
-	return `${whose} already hold more than the wanted ratio leaves room for`;
 }

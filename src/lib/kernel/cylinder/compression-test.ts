@@ -7,7 +7,7 @@ export const balanceRules = {
 		source: 'US Army TM 5-4210-230-14&P addendum 2'
 	},
 	'70-of-highest': {
-		words: 'lowest at least 70 % of the highest',
+		words: 'lowest at least 70 % of the highest, and not under 100 psi (6.9 bar)',
 		source: 'a maker’s printed rule (maker not named)'
 	},
 	'80-of-mean': {
@@ -29,7 +29,9 @@ export type BalanceRule = keyof typeof balanceRules;
 const psiBar = (0.45359237 * 9.80665) / 25.4 ** 2 / 0.1;
 
 export type Balance = {
-	/** The least that the rule allows for this set, in the unit of the readings, bar. */
+	/** What the rule asks of this set by itself, bar. */
+	ruleBar: number;
+	/** The least allowed: the rule's, or the engine's own least where that lies higher, bar. */
 	allowedBar: number;
 	/** Lowest as a share of the highest. */
 	lowestShare: number;
@@ -42,31 +44,39 @@ export type Balance = {
 /**
  * Judges the readings of a compression test against each other by a named rule.
  *
- * Formula: 0.75 · highest; 0.70 · highest; 0.80 · mean; highest − 10 psi; highest − 100 psi.
- * @param readBar highest gauge reading of each cylinder, bar, at least two, above zero
+ * Formula: 0.75 · highest; 0.70 · highest but 100 psi at least; 0.80 · mean; highest − 10 psi; highest − 100 psi.
+ * @param readBar highest gauge reading of each cylinder, bar, at least two, zero or more
  * @param rule which published rule; a maker's own limits win over all of them
+ * @param leastBar the engine's own least, bar, where its data sheet states one: it rules as well
  * @returns the least allowed (bar), lowest over highest, the low cylinders and low neighbours
  * Source: as named beside each rule in `balanceRules`.
  * @example compressionBalance([10.3, 10, 10.2, 7.4], '75-of-highest') // cylinder 4 is low
  */
 export function compressionBalance(
 	readBar: readonly number[],
-	rule: BalanceRule
+	rule: BalanceRule,
+	leastBar = 0
 ): Outcome<Balance> {
 	if (readBar.length < 2) return cannot('a set to compare has at least two cylinders');
-	if (readBar.some((one) => !(one > 0) || one > 200))
-		return cannot('a compression reading is above zero and below 200 bar');
+	// A burnt valve reads nothing at all: zero is a reading, and a low one.
+	if (readBar.some((one) => !(one >= 0) || one > 200))
+		return cannot('a compression reading lies from 0 to 200 bar');
+	if (!(leastBar >= 0) || leastBar > 200)
+		return cannot('the engine’s own least lies from 0 to 200 bar');
 	const highest = Math.max(...readBar);
+	if (highest === 0) return cannot('no cylinder shows any pressure: look at the gauge first');
 	const mean = readBar.reduce((sum, one) => sum + one, 0) / readBar.length;
-	const allowedBar = {
+	const ruleBar = {
 		'75-of-highest': 0.75 * highest,
-		'70-of-highest': 0.7 * highest,
+		'70-of-highest': Math.max(0.7 * highest, 100 * psiBar),
 		'80-of-mean': 0.8 * mean,
 		'10-psi-apart': highest - 10 * psiBar,
 		'100-psi-apart': highest - 100 * psiBar
 	}[rule];
+	const allowedBar = Math.max(ruleBar, leastBar);
 	const low = readBar.flatMap((one, at) => (one < allowedBar - 1e-9 ? [at + 1] : []));
 	return computed({
+		ruleBar,
 		allowedBar,
 		lowestShare: Math.min(...readBar) / highest,
 		low,
@@ -74,31 +84,4 @@ export function compressionBalance(
 			.filter((one) => low.includes(one + 1))
 			.map((one): [number, number] => [one, one + 1])
 	});
-}
-
-export type WetVerdict = 'rings' | 'valves-or-gasket' | 'unclear';
-
-/**
- * What a spoonful of oil says of a low cylinder.
- *
- * Formula: rise = (wet − dry) / dry; rings where it is clear, valves or gasket where there is none.
- * @param dryBar, wetBar readings before and after about a tablespoon of oil, bar
- * @returns the rise as a share and what it points to; a rise between 5 and 15 % is unclear
- * Source: US Army TM 5-4210-230-14&P addendum 2, step 7; the shares that count as "clear" and
- *   "none" are common practice, no source.
- * @example wetTest(7.4, 9.5) // a rise of 28 %: rings, piston or bore
- */
-export function wetTest(
-	dryBar: number,
-	wetBar: number
-): Outcome<{ rise: number; verdict: WetVerdict }> {
-	if (!(dryBar > 0) || !(wetBar > 0) || dryBar > 200 || wetBar > 200)
-		return cannot('both readings are above zero and below 200 bar');
-	const rise = (wetBar - dryBar) / dryBar;
-	return Number.isFinite(rise)
-		? computed({
-				rise,
-				verdict: rise >= 0.15 ? 'rings' : rise <= 0.05 ? 'valves-or-gasket' : 'unclear'
-			})
-		: cannot('the readings are out of all proportion');
 }

@@ -1,7 +1,8 @@
 import { cannot, computed, type Outcome } from '../outcome';
 
 export type Cycle = 'four-stroke' | 'two-stroke';
-const cycleDeg: Record<Cycle, number> = { 'four-stroke': 720, 'two-stroke': 360 };
+/** Crank degrees from one firing of a cylinder to its next. */
+export const cycleDeg: Record<Cycle, number> = { 'four-stroke': 720, 'two-stroke': 360 };
 
 /**
  * Interval of an engine that fires evenly.
@@ -16,6 +17,24 @@ export function evenIntervalDeg(cylinders: number, cycle: Cycle): Outcome<number
 	if (!Number.isInteger(cylinders) || cylinders < 1 || cylinders > 64)
 		return cannot('an engine has a whole number of cylinders');
 	return computed(cycleDeg[cycle] / cylinders);
+}
+
+/**
+ * How far apart the intervals of an engine lie.
+ *
+ * @param firings as `firingsOf` gives them
+ * @returns the shortest and the longest, degrees, and whether they are all alike
+ * @example intervalsOf(firings) // { leastDeg: 180, mostDeg: 540, even: false }
+ */
+export function intervalsOf(firings: readonly Firing[]): {
+	leastDeg: number;
+	mostDeg: number;
+	even: boolean;
+} {
+	const all = firings.map((one) => one.toNextDeg);
+	if (all.length === 0) throw new RangeError('an engine fires');
+	const [leastDeg, mostDeg] = [Math.min(...all), Math.max(...all)];
+	return { leastDeg, mostDeg, even: mostDeg - leastDeg < 1e-6 };
 }
 
 export type Firing = { cylinder: number; atDeg: number; toNextDeg: number };

@@ -17,6 +17,9 @@ export function leakPercent(inputBar: number, cylinderBar: number): Outcome<numb
 	return computedNumber((100 * (inputBar - cylinderBar)) / inputBar);
 }
 
+/** The differential test's line: a quarter of what is given (FAA AC 43.13-1B, para 8-14; reference C10). */
+export const suspectAbovePercent = 25;
+
 /** Bands of the trade for ordinary engines, no source; a maker's own limits win. */
 export const leakBands = [
 	{ upto: 10, words: 'good' },
@@ -37,21 +40,8 @@ export const leakBands = [
 export function leakBand(percent: number): Outcome<{ words: string; suspect: boolean }> {
 	const band = leakBands.find((one) => percent <= one.upto);
 	if (!(percent >= 0) || !band) return cannot('a leakage lies from 0 to 100 %');
-	return computed({ words: band.words, suspect: percent > 25 + 1e-9 });
+	return computed({ words: band.words, suspect: percent > suspectAbovePercent + 1e-9 });
 }
-
-/**
- * Where the air is heard, and what that says.
- * Source: an aviation association's article and a small-engine manual for the first three; the
- * last two trade-wide (reference C14).
- */
-export const whereAirComesOut = [
-	{ at: 'the exhaust', says: 'exhaust valve' },
-	{ at: 'the inlet or throttle', says: 'inlet valve' },
-	{ at: 'the crankcase breather or oil filler', says: 'rings, piston or bore' },
-	{ at: 'bubbles in the coolant', says: 'head gasket, cracked head or liner' },
-	{ at: 'the neighbouring plug hole', says: 'head gasket between the two cylinders' }
-] as const;
 
 /**
  * Blow-by rate from a count over some minutes.

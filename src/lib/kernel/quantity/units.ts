@@ -8,7 +8,7 @@
 const poundForceN = 0.45359237 * 9.80665;
 
 /** A scale with a zero of its own: inside = value · factor + offset. */
-type Affine = { factor: number; offset: number };
+export type Affine = { factor: number; offset: number };
 
 export const lengthMm = { mm: 1, cm: 10, m: 1000, µm: 0.001, in: 25.4, thou: 0.0254 } as const;
 export const torqueNm = {
@@ -73,6 +73,18 @@ export type DimensionName = keyof typeof dimensions;
 export type UnitOf<D extends DimensionName> = keyof (typeof dimensions)[D] & string;
 
 /**
+ * How a unit lies to the one used inside: inside = value · factor + offset.
+ *
+ * @throws RangeError where the unit is of another dimension
+ * @example scaleOf('temperature', '°F') // { factor: 0.5556, offset: −17.78 }
+ */
+export function scaleOf(dimension: DimensionName, unit: string): Affine {
+	const scale = (dimensions[dimension] as Record<string, number | Affine>)[unit];
+	if (scale === undefined) throw new RangeError(`${unit} is no unit of ${dimension}`);
+	return typeof scale === 'number' ? { factor: scale, offset: 0 } : scale;
+}
+
+/**
  * Converts between two units of one dimension.
  *
  * Formula: (x · f(from) + z(from) − z(to)) / f(to), with the factors above and z zero for all but
@@ -87,13 +99,8 @@ export function convert<D extends DimensionName>(
 	from: UnitOf<D>,
 	to: UnitOf<D>
 ): number {
-	const scales = dimensions[dimension] as unknown as Record<string, number | Affine>;
-	const [a, b] = [affine(scales[from]), affine(scales[to])];
-	const converted = a && b ? (value * a.factor + (a.offset - b.offset)) / b.factor : Number.NaN;
+	const [a, b] = [scaleOf(dimension, from), scaleOf(dimension, to)];
+	const converted = (value * a.factor + (a.offset - b.offset)) / b.factor;
 	if (!Number.isFinite(converted)) throw new RangeError(`no conversion from ${from} to ${to}`);
 	return converted;
-}
-
-function affine(scale: number | Affine | undefined): Affine | undefined {
-	return typeof scale === 'number' ? { factor: scale, offset: 0 } : scale;
 }

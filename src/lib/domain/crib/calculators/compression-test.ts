@@ -1,23 +1,20 @@
+import { balanceRules, type BalanceRule } from '$lib/kernel/cylinder/compression-test';
 import {
-	balanceRules,
-	compressionBalance,
-	wetTest,
-	type BalanceRule
-} from '$lib/kernel/cylinder/compression-test';
+	compressionVerdicts,
+	type CylinderVerdict
+} from '$lib/kernel/cylinder/compression-verdict';
 import { computed } from '$lib/kernel/outcome';
+import { dimensionOf } from '../../data-sheets/value-of';
+import type { Step } from '../../working';
 import { calculator } from '../calculator';
-import { choice, table } from '../field';
+import { choice, quantity, table } from '../field';
 import type { ResultLine } from '../worked';
-import { figure } from './formula-figures';
+import { balanceSteps, risesIn } from './cylinder/balance-steps';
+import { pressure, stated } from './cylinder/faces';
 
-const verdicts = {
-	rings: 'a clear rise: rings, piston or bore',
-	'valves-or-gasket': 'no rise: valves or head gasket',
-	unclear: 'a little: neither is shown'
-};
-const options = Object.entries(balanceRules).map(([value, one]) => ({
-	value: value as BalanceRule,
-	words: one.words
+const options = (Object.keys(balanceRules) as BalanceRule[]).map((value) => ({
+	value,
+	words: balanceRules[value].words
 }));
 
 /** A set of compression readings judged against each other by a published rule. */
@@ -27,13 +24,15 @@ export const compressionTest = calculator({
 	says: 'Which cylinders of a set are low by a published rule, which neighbours are low together, and what a spoonful of oil says of them.',
 	drawer: 'cylinder',
 	caution:
-		'Ignition disabled, fuel shut off, throttle open, all plugs out, hands clear of the belts. A maker’s own limits win over every rule here.',
+		'Ignition disabled, fuel shut off, throttle open, all plugs out, hands clear of the belts. Never put oil into a diesel or near a glow plug for this: what fits above its piston is little more than a spoonful.',
 	formulas: ['cylinder/compression-balance', 'cylinder/wet-test'],
-	sources: Object.values(balanceRules).map((one) => `${one.words}: ${one.source}`),
+	sources: [
+		...Object.values(balanceRules).map((one) => `${one.words}: ${one.source}.`),
+		'At least five compression strokes each, or until the gauge stops rising; the same number for all: US Army TM 5-4210-230-14&P addendum 2, steps 1 to 6.'
+	],
 	fields: {
 		readings: table({
-			dimension: 'pressure',
-			unit: { metric: 'bar', inch: 'psi' },
+			...pressure,
 			words: 'Highest reading of each cylinder',
 			hint: 'The same number of strokes for each. Wet: again after about a tablespoon of oil.',
 			row: 'Cylinder',
@@ -44,14 +43,27 @@ export const compressionTest = calculator({
 			rows: { from: 4, least: 2, most: 16 },
 			example: '10.3_*10.0_*10.2_*7.4_9.5'
 		}),
-		rule: choice({ words: 'Rule', options, example: '75-of-highest', initial: '75-of-highest' })
+		rule: choice({ words: 'Rule', options, example: '75-of-highest', initial: '75-of-highest' }),
+		least: quantity({
+			...pressure,
+			words: 'Least that the engine’s data sheet allows',
+			decimals: 1,
+			least: 0,
+			most: 100,
+			optional: true,
+			example: '8.5'
+		})
 	},
-	work({ readings, rule }) {
-		const dry = readings.map((row) => Number(row.dry));
-		const found = compressionBalance(dry, rule);
+	work({ readings, rule, least }) {
+		const typed = readings.map(({ dry, wet }) => ({
+			dryBar: Number(dry),
+			...(typeof wet === 'number' ? { wetBar: wet } : {})
+		}));
+		const found = compressionVerdicts(typed, rule, least);
 		if (!found.ok) return found;
-		const { allowedBar, lowestShare, low, neighbours } = found.value;
-		const bar = { unit: 'bar', decimals: 1 };
+		const { balance, cylinders } = found.value;
+		const { low, allowedBar, lowestShare } = balance;
+		const bar = { unit: 'bar', decimals: 2 };
 		const lines: ResultLine[] = [
 			{
 				key: 'low',
@@ -62,62 +74,64 @@ export const compressionTest = calculator({
 			{ key: 'allowed', words: 'Least allowed in this set', value: allowedBar, ...bar, main: true },
 			{
 				key: 'share',
-				words: 'Lowest of the highest',
+				words: 'Lowest, of the highest',
 				value: lowestShare * 100,
 				unit: '%',
 				decimals: 0
-			}
+			},
+			...cylinders.flatMap(verdictLine)
 		];
-		for (const [at, row] of readings.entries()) {
-			if (typeof row.wet !== 'number' || typeof row.dry !== 'number') continue;
-			const wet = wetTest(row.dry, row.wet);
-			if (!wet.ok) return wet;
-			lines.push({
-				key: `wet-${at}`,
-				words: `Cylinder ${at + 1} with oil, +${(wet.value.rise * 100).toFixed(0)} %`,
-				text: verdicts[wet.value.verdict]
-			});
-		}
+		const working: Step[] = [
+			...balanceSteps(
+				typed.map((one) => one.dryBar),
+				rule,
+				balance,
+				least
+			),
+			...risesIn(typed, cylinders)
+		];
 		return computed({
 			lines,
-			working: [
-				{
-					words: balanceRules[rule].words,
-					rule: ruleLetters[rule],
-					formula: ruleFigures(rule, dry),
-					value: allowedBar,
-					unit: 'bar',
-					decimals: 2
-				}
-			],
-			notes: neighbours.map(
-				([a, b]) =>
-					`Cylinders ${a} and ${b} are low side by side: look at the gasket between them first.`
-			),
+			working,
 			drawing: {
 				kind: 'cylinder-bars',
 				unit: 'bar',
-				bars: dry.map((value, at) => ({ words: String(at + 1), value, low: low.includes(at + 1) })),
+				decimals: 1,
+				bars: typed.map(({ dryBar, wetBar }, at) => ({
+					words: String(at + 1),
+					value: dryBar,
+					marked: low.includes(at + 1),
+					...(wetBar === undefined ? {} : { second: wetBar })
+				})),
+				secondWords: 'with oil',
 				line: allowedBar,
 				lineWords: 'least allowed'
 			}
 		});
+	},
+	presets: (sheet) => {
+		const found = dimensionOf(sheet, 'cylinder.compressionPressure');
+		const least = found?.runAgain?.least ?? found?.build?.least;
+		if (!found || least === undefined) return [];
+		const rule =
+			sheet.layout?.ignition === 'compression'
+				? ('100-psi-apart' satisfies BalanceRule)
+				: undefined;
+		return [{ key: found.key, words: found.words, values: stated({ least: String(least), rule }) }];
 	}
 });
 
-const ruleLetters: Record<BalanceRule, string> = {
-	'75-of-highest': '0.75 · highest',
-	'70-of-highest': '0.70 · highest',
-	'80-of-mean': '0.80 · mean',
-	'10-psi-apart': 'highest − 0.69 bar',
-	'100-psi-apart': 'highest − 6.9 bar'
-};
-
-function ruleFigures(rule: BalanceRule, dry: number[]): string {
-	const highest = figure(Math.max(...dry), 2);
-	if (rule === '80-of-mean')
-		return `0.80 · (${dry.map((one) => figure(one, 2)).join(' + ')}) / ${dry.length}`;
-	if (rule === '75-of-highest') return `0.75 · ${highest}`;
-	if (rule === '70-of-highest') return `0.70 · ${highest}`;
-	return rule === '10-psi-apart' ? `${highest} − 0.69` : `${highest} − 6.89`;
+/** What follows for a cylinder; nothing where nothing does. */
+function verdictLine({ cylinder, share, wet, next }: CylinderVerdict): ResultLine[] {
+	if (!next && !wet) return [];
+	const rise = wet
+		? `, ${wet.rise < 0 ? '−' : '+'}${Math.abs(wet.rise * 100).toFixed(0)} % with oil`
+		: '';
+	return [
+		{
+			key: `cylinder-${cylinder}`,
+			words: `Cylinder ${cylinder}: ${(share * 100).toFixed(0)} % of the highest${rise}`,
+			text: next ?? 'within: nothing follows.'
+		}
+	];
 }

@@ -1,15 +1,15 @@
 import { clearanceForCm3 } from '$lib/kernel/cylinder/compression-ratio';
+import { discHeightMm } from '$lib/kernel/cylinder/disc-volume';
 import { displacementCm3 } from '$lib/kernel/cylinder/displacement';
 import { crankAngleAtDeg, liquidLock as lockOf } from '$lib/kernel/cylinder/liquid-lock';
 import { computed } from '$lib/kernel/outcome';
-import { dimensionOf } from '../../data-sheets/value-of';
 import type { Step } from '../../working';
 import { calculator } from '../calculator';
 import { number, quantity } from '../field';
 import type { ResultLine } from '../worked';
-import { figure } from './formula-figures';
-
-const length = { dimension: 'length', unit: { metric: 'mm', inch: 'in' } } as const;
+import { boreRange, cm3, length, middleOf, stated, strokeRange, volume } from './cylinder/faces';
+import { figure, plain } from './formula-figures';
+import { allOf } from './temperature/all-of';
 
 /** Where trapped liquid stops a piston. */
 export const liquidLock = calculator({
@@ -18,7 +18,7 @@ export const liquidLock = calculator({
 	says: 'How much water, oil or fuel stops a piston before top dead centre, and where on its stroke.',
 	drawer: 'cylinder',
 	caution:
-		'Never turn an engine that may hold liquid by its starter: take the plugs or injectors out, turn it by hand, and stand clear of the holes.',
+		'Never turn an engine that may hold liquid by its starter: take plugs or injectors out, turn it by hand, and stand clear of the holes. After a lock, every rod is checked for length, bend and twist before it runs again.',
 	formulas: [
 		'cylinder/displacement',
 		'cylinder/clearance-for',
@@ -26,31 +26,23 @@ export const liquidLock = calculator({
 		'cylinder/crank-angle'
 	],
 	fields: {
-		bore: quantity({ ...length, words: 'Bore', decimals: 2, least: 5, most: 2000, example: '86' }),
-		stroke: quantity({
-			...length,
-			words: 'Stroke',
-			decimals: 2,
-			least: 5,
-			most: 3000,
-			example: '94.6'
-		}),
+		bore: quantity({ ...length, ...boreRange, words: 'Bore', example: '86' }),
+		stroke: quantity({ ...length, ...strokeRange, words: 'Stroke', example: '94.6' }),
 		ratio: number({ words: 'Compression ratio, to 1', least: 1.5, most: 40, example: '20.5' }),
 		liquid: quantity({
-			dimension: 'volume',
-			unit: { metric: 'cm³', inch: 'in³' },
+			...volume,
 			words: 'Liquid above the piston',
-			decimals: 0,
+			hint: 'What was sucked out, or what is missing elsewhere.',
 			least: 0,
-			most: 100_000,
-			example: '40'
+			most: 500_000,
+			example: '60'
 		}),
 		rod: quantity({
 			...length,
 			words: 'Connecting rod, centre to centre',
-			decimals: 1,
+			hint: 'With it, the crank angle.',
 			least: 5,
-			most: 5000,
+			most: 10_000,
 			optional: true,
 			example: '150'
 		})
@@ -61,7 +53,18 @@ export const liquidLock = calculator({
 		if (!clearance.ok) return clearance;
 		const found = lockOf(liquid, clearance.value, bore);
 		if (!found.ok) return found;
-		const { locks, belowTdcMm } = found.value;
+		const heights = allOf({
+			clearance: discHeightMm(clearance.value, bore),
+			liquid: discHeightMm(liquid, bore)
+		});
+		if (!heights.ok) return heights;
+		const { locks, roomCm3, belowTdcMm } = found.value;
+		// More than the whole cylinder holds cannot have been there while the piston came up.
+		const within = belowTdcMm <= stroke;
+		const angle =
+			rod !== undefined && locks && within ? crankAngleAtDeg(stroke, rod, belowTdcMm) : undefined;
+		if (angle && !angle.ok) return angle;
+		const crank = { unit: '°', decimals: 0 };
 		const lines: ResultLine[] = [
 			{
 				key: 'verdict',
@@ -73,89 +76,96 @@ export const liquidLock = calculator({
 				key: 'clearance',
 				words: 'Liquid that just locks it',
 				value: clearance.value,
-				unit: 'cm³',
-				decimals: 1,
+				...cm3,
 				main: true
 			},
-			{
-				key: 'below',
-				words: 'Stopped below top dead centre by',
-				value: belowTdcMm,
-				unit: 'mm',
-				decimals: 2
-			}
+			locks
+				? {
+						key: 'below',
+						words: 'Stopped below top dead centre by',
+						value: belowTdcMm,
+						unit: 'mm',
+						decimals: 2
+					}
+				: { key: 'room', words: 'More would still go in', value: roomCm3, ...cm3 },
+			...(angle
+				? [{ key: 'angle', words: 'Crank, before top dead centre', value: angle.value, ...crank }]
+				: [])
 		];
 		const working: Step[] = [
 			{
-				words: 'Clearance volume',
-				rule: 'Vc = Vs / (ε − 1)',
-				formula: `${figure(sweptCm3, 1)} / (${ratio} − 1)`,
-				value: clearance.value,
-				unit: 'cm³',
-				decimals: 1
+				words: 'Swept volume, lengths in cm',
+				rule: 'Vs = π/4 · B² · S',
+				formula: `π/4 · ${plain(bore / 10)}² · ${plain(stroke / 10)}`,
+				value: sweptCm3,
+				...cm3
 			},
 			{
-				words: locks ? 'What does not fit, over the area of the piston' : 'All of it fits',
-				rule: 'x = (q − Vc) / (π/4 · B²)',
-				formula: locks
-					? `(${figure(liquid, 1)} − ${figure(clearance.value, 1)}) · 1000 / (π/4 · ${figure(bore, 2)}²)`
-					: `${figure(liquid, 1)} < ${figure(clearance.value, 1)}`,
-				value: belowTdcMm,
-				unit: 'mm',
-				decimals: 2
-			}
+				words: 'Clearance volume: as much liquid just locks it',
+				rule: 'Vc = Vs / (ε − 1)',
+				formula: `${figure(sweptCm3, 2)} / (${plain(ratio)} − 1)`,
+				value: clearance.value,
+				...cm3
+			},
+			locks
+				? {
+						words: 'What does not fit, spread over the piston',
+						rule: 'x = (q − Vc) / (π/4 · B²)',
+						formula: `(${figure(liquid, 2)} − ${figure(clearance.value, 2)}) · 1000 / (π/4 · ${plain(bore)}²)`,
+						value: belowTdcMm,
+						unit: 'mm',
+						decimals: 2
+					}
+				: {
+						words: 'All of it fits',
+						rule: 'room = Vc − q',
+						formula: `${figure(clearance.value, 2)} − ${figure(liquid, 2)}`,
+						value: roomCm3,
+						...cm3
+					},
+			...(angle && rod !== undefined
+				? [
+						{
+							words: 'Crank angle there, by the triangle of crank, rod and centre line',
+							rule: 'cos φ = (r² + (r + L − x)² − L²) / (2 · r · (r + L − x)), r = S/2',
+							formula: `r = ${plain(stroke / 2)}, L = ${plain(rod)}, x = ${figure(belowTdcMm, 2)}`,
+							value: angle.value,
+							...crank
+						}
+					]
+				: [])
 		];
-		if (rod !== undefined && locks && belowTdcMm <= stroke) {
-			const angle = crankAngleAtDeg(stroke, rod, belowTdcMm);
-			if (!angle.ok) return angle;
-			lines.push({
-				key: 'angle',
-				words: 'Crank angle before top dead centre',
-				value: angle.value,
-				unit: '°',
-				decimals: 0
-			});
-		}
 		return computed({
 			lines,
 			working,
-			notes:
-				belowTdcMm > stroke
-					? [
-							'More liquid than the whole cylinder holds: the rest came in by the ports while they were open.'
-						]
-					: [],
+			notes: within
+				? []
+				: [
+						'That is more than the whole cylinder holds: the rest lay in the ports or came in while they were open. It locks at once.'
+					],
 			drawing: {
-				kind: 'cylinder-volumes',
+				kind: 'liquid-lock',
 				boreMm: bore,
 				strokeMm: stroke,
-				sweptCm3,
-				parts: [
-					{ words: 'clearance', cm3: clearance.value },
-					{ words: 'liquid', cm3: liquid }
-				]
+				clearanceMm: heights.value.clearance,
+				liquidMm: heights.value.liquid,
+				belowMm: within ? belowTdcMm : stroke,
+				locks,
+				liquidCm3: liquid,
+				...(rod === undefined ? {} : { rodMm: rod }),
+				...(angle ? { crankDeg: angle.value } : {})
 			}
 		});
 	},
 	presets: (sheet) => {
-		const [bore, stroke, ratio, rod] = [
-			'cylinder.bore',
-			'crankshaft.stroke',
-			'cylinder.compressionRatio',
-			'rod.length'
-		].map((key) => dimensionOf(sheet, key)?.nominal);
-		if (!bore || !stroke) return [];
-		return [
-			{
-				key: 'cylinder.bore',
-				words: 'One cylinder',
-				values: {
-					bore: String(bore),
-					stroke: String(stroke),
-					ratio: ratio ? String(ratio) : '',
-					rod: rod ? String(rod) : ''
-				}
-			}
-		];
+		const values = stated({
+			bore: middleOf(sheet, 'cylinder.bore'),
+			stroke: middleOf(sheet, 'crankshaft.stroke'),
+			ratio: middleOf(sheet, 'cylinder.compressionRatio'),
+			rod: middleOf(sheet, 'rod.length')
+		});
+		return values.bore && values.stroke
+			? [{ key: 'cylinder.bore', words: 'One cylinder', values }]
+			: [];
 	}
 });

@@ -1,7 +1,6 @@
 import type { Formula } from '../../formula';
 import { computed, type Outcome } from '../../outcome';
-import { compressionHeight, rodLength } from '../block-stack';
-import { evenIntervalDeg, firingsOf } from '../firing';
+import { compressionHeight, pistonDeck, pistonToHeadMm, rodLength } from '../block-stack';
 import { crankAngleAtDeg, pistonBelowTdcMm } from '../liquid-lock';
 import { bucklingOf, roundSlenderness } from '../rod-buckling';
 import {
@@ -141,31 +140,26 @@ export const mechanismFormulas: readonly Formula[] = [
 		}
 	},
 	{
-		id: 'cylinder/even-interval',
-		works: evenIntervalDeg,
-		formula: 'four-stroke 720° / n, two-stroke 360° / n',
-		source: 'definition',
+		id: 'cylinder/piston-deck',
+		works: pistonDeck,
+		formula: 'deck = H − hk − L − S/2',
+		source: 'geometry of the block',
 		example: {
-			says: 'three cylinders, four-stroke',
-			gives: () => evenIntervalDeg(3, 'four-stroke'),
-			wanted: 240,
+			says: 'block 9.025, compression height 1.25, rod 6.0, stroke 3.5 in',
+			gives: () => pistonDeck({ blockHeight: 9.025, compressionHeight: 1.25, rod: 6, stroke: 3.5 }),
+			wanted: 0.025,
 			within: 1e-9
 		}
 	},
 	{
-		id: 'cylinder/firings',
-		works: firingsOf,
-		formula:
-			'each fires when its throw stands at top dead centre: the next such angle after the one before',
-		source: 'geometry of the crank',
+		id: 'cylinder/piston-to-head',
+		works: pistonToHeadMm,
+		formula: 's = gasket + deck',
+		source: 'geometry of the block',
 		example: {
-			says: 'an in-line four, 1-3-4-2: from the first to the second firing',
-			gives: () =>
-				part(
-					firingsOf([0, 180, 180, 0], [1, 3, 4, 2], 'four-stroke'),
-					(all) => all[0]?.toNextDeg ?? 0
-				),
-			wanted: 180,
+			says: 'gasket 1.2 mm, piston 0.45 mm proud, mm',
+			gives: () => pistonToHeadMm(1.2, -0.45),
+			wanted: 0.75,
 			within: 1e-9
 		}
 	}

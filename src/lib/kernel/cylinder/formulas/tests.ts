@@ -1,7 +1,8 @@
 import type { Formula } from '../../formula';
 import { computed, type Outcome } from '../../outcome';
-import { compressionBalance, wetTest } from '../compression-test';
+import { compressionBalance } from '../compression-test';
 import { blowByPerHour, leakBand, leakPercent, vacuumDropInHg } from '../leak-down';
+import { wetTest } from '../wet-test';
 
 const part = <T>(found: Outcome<T>, of: (value: T) => number): Outcome<number> =>
 	found.ok ? computed(of(found.value)) : found;
@@ -11,7 +12,8 @@ export const testFormulas: readonly Formula[] = [
 	{
 		id: 'cylinder/compression-balance',
 		works: compressionBalance,
-		formula: '0.75 · highest; 0.70 · highest; 0.80 · mean; highest − 10 psi; highest − 100 psi',
+		formula:
+			'0.75 · highest; 0.70 · highest but 100 psi at least; 0.80 · mean; highest − 10 psi; highest − 100 psi',
 		source:
 			'US Army TM 5-4210-230-14&P, TM 1-1500-204-23-1, TM 10-3930-618-20, TM 5-2420-230-24-2, by rule',
 		example: {

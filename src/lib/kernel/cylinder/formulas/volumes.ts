@@ -1,9 +1,11 @@
 import type { Formula } from '../../formula';
 import { computed, type Outcome } from '../../outcome';
-import { clearanceForCm3, compressionRatio, ratioOf, solvePart } from '../compression-ratio';
-import { discVolumeCm3 } from '../disc-volume';
+import { clearanceForCm3, compressionRatio, ratioOf } from '../compression-ratio';
+import { discHeightMm, discVolumeCm3 } from '../disc-volume';
 import { displacementCm3 } from '../displacement';
 import { liquidLock } from '../liquid-lock';
+import { skimmedChamberCm3 } from '../skimming';
+import { solvePart } from '../solve-part';
 
 const part = <T>(found: Outcome<T>, of: (value: T) => number): Outcome<number> =>
 	found.ok ? computed(of(found.value)) : found;
@@ -39,6 +41,18 @@ export const volumeFormulas: readonly Formula[] = [
 			gives: () => discVolumeCm3(104.14, 1.0414),
 			wanted: 8.87,
 			within: 0.005
+		}
+	},
+	{
+		id: 'cylinder/disc-height',
+		works: discHeightMm,
+		formula: 'h = V / (π/4 · D²)',
+		source: 'definition',
+		example: {
+			says: '8.87 cm³ over 104.14 mm, mm',
+			gives: () => discHeightMm(8.87, 104.14),
+			wanted: 1.0414,
+			within: 0.0005
 		}
 	},
 	{
@@ -84,9 +98,21 @@ export const volumeFormulas: readonly Formula[] = [
 		source: 'definition',
 		example: {
 			says: 'the chamber of the same cylinder for 10 : 1, cm³',
-			gives: () => solvePart(cylinder, parts, 'chamberCm3', 10),
+			gives: () => part(solvePart(cylinder, parts, 'chamberCm3', 10), (one) => one.value),
 			wanted: 64.86,
 			within: 0.05
+		}
+	},
+	{
+		id: 'cylinder/skimmed-chamber',
+		works: skimmedChamberCm3,
+		formula: 'V = V0 − A · c / 10, V in cm³, A in cm², c in mm',
+		source: 'volume of a slice',
+		example: {
+			says: '52.6 cm³ with an opening of 50 cm², 0.2 mm taken off, cm³',
+			gives: () => skimmedChamberCm3(52.6, 50, 0.2),
+			wanted: 51.6,
+			within: 1e-9
 		}
 	},
 	{

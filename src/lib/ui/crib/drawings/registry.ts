@@ -15,6 +15,10 @@ import GridSection from './GridSection.svelte';
 import PatternOrder from './PatternOrder.svelte';
 import Wrench from './Wrench.svelte';
 import CylinderVolumes from './CylinderVolumes.svelte';
+import BoreAndStroke from './BoreAndStroke.svelte';
+import LiquidLock from './LiquidLock.svelte';
+import Firing from './Firing.svelte';
+import DualScale from './DualScale.svelte';
 import CylinderBars from './CylinderBars.svelte';
 import Budget from './Budget.svelte';
 import Clearance from './Clearance.svelte';
@@ -56,6 +60,10 @@ const components: Drawn = {
 	'pattern-order': PatternOrder,
 	wrench: Wrench,
 	'cylinder-volumes': CylinderVolumes,
+	'bore-and-stroke': BoreAndStroke,
+	'liquid-lock': LiquidLock,
+	firing: Firing,
+	'dual-scale': DualScale,
 	'cylinder-bars': CylinderBars
 };
 
