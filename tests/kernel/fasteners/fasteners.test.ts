@@ -4,7 +4,8 @@ import { effectiveLever, torqueAtFastener, wrenchSetting } from '$lib/kernel/fas
 import { preloadN, torqueForPreloadNm } from '$lib/kernel/fasteners/preload';
 import { proofLoadN, proofStressMPa } from '$lib/kernel/fasteners/proof-load';
 import { stressAreaIn2, stressAreaMm2 } from '$lib/kernel/fasteners/stress-area';
-import { firstWrongStep, loosening, orderFromMiddle } from '$lib/kernel/fasteners/tightening-order';
+import { firstWrongStep } from '$lib/kernel/fasteners/departure';
+import { loosening, orderFromMiddle } from '$lib/kernel/fasteners/tightening-order';
 import { travelMm } from '$lib/kernel/fasteners/turn';
 
 const value = (outcome: { ok: true; value: number } | { ok: false; because: string }) => {

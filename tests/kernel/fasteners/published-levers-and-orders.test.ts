@@ -1,9 +1,18 @@
+import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { patternFaults } from '$lib/kernel/fasteners/bolt-pattern';
 import { forgottenExtension, withDrag } from '$lib/kernel/fasteners/drag';
 import { effectiveLever, torqueAtFastener, wrenchSetting } from '$lib/kernel/fasteners/extension';
-import { thirdsNm, turnedDeg } from '$lib/kernel/fasteners/stage-sequence';
-import { departureFromSound, orderFromMiddle } from '$lib/kernel/fasteners/tightening-order';
+import { stagePasses } from '$lib/kernel/fasteners/stage-passes';
+import { stageSequence, thirdsNm, turnedDeg } from '$lib/kernel/fasteners/stage-sequence';
+import { departureFromSound } from '$lib/kernel/fasteners/departure';
+import { orderFromMiddle, orderFromOutside } from '$lib/kernel/fasteners/tightening-order';
+import {
+	accuracyFrom,
+	bestRange,
+	shareOfScale,
+	usualAccuracy
+} from '$lib/kernel/fasteners/wrench-range';
 import type { Outcome } from '$lib/kernel/outcome';
 import { expectWithin, given, referenceOf, type Worked } from '../../support/reference';
 
@@ -30,6 +39,36 @@ function leverAnswer(entry: Worked): number {
 describe('wrenches with extensions and drag, published values', () => {
 	it.each(referenceOf<Worked>('torque-wrench-levers.json'))('%s', (_, entry) => {
 		expectWithin(leverAnswer(entry), entry);
+	});
+});
+
+const ranges = referenceOf<Worked>('torque-wrench-ranges.json');
+describe('the part of a torque wrench that is used, published values', () => {
+	it.each(ranges.filter(([, { id }]) => id.startsWith('X25')))('%s', (_, { expected }) => {
+		const { from, within } = expected as unknown as { from: number; within: number };
+		expect([100 * accuracyFrom, 100 * usualAccuracy]).toEqual([from, within]);
+		expect(value(shareOfScale((200 * from) / 100, 200))).toBeCloseTo(accuracyFrom, 12);
+	});
+	it.each(ranges.filter(([, { id }]) => id.startsWith('X26')))('%s', (_, { expected }) => {
+		const { min, max } = expected as unknown as { min: number; max: number };
+		expect([100 * bestRange.least, 100 * bestRange.most]).toEqual([min, max]);
+	});
+	it('is no more than all of it, whatever the unit', () => {
+		const torque = fc.double({ min: 0.1, max: 1000, noNaN: true });
+		fc.assert(
+			fc.property(torque, torque, (setting, full) => {
+				const found = shareOfScale(setting, full);
+				if (setting > full) expect(found).toMatchObject({ ok: false });
+				else {
+					expect(value(found)).toBeLessThanOrEqual(1);
+					// 1 lbf·ft = 1.3558179483314 N·m exactly, NIST SP 811.
+					const inPounds = value(shareOfScale(setting / 1.3558179483314, full / 1.3558179483314));
+					expect(inPounds).toBeCloseTo(value(found), 10);
+				}
+			})
+		);
+		for (const odd of [0, -1, NaN, Infinity])
+			expect(shareOfScale(odd, 100)).toMatchObject({ ok: false });
 	});
 });
 
@@ -67,6 +106,7 @@ describe('tightening orders, published', () => {
 		expect(patternFaults({ bolts, printedOrder: printed })).toEqual([]);
 		expect(value(departureFromSound(bolts, printed))).toBeNull();
 		expect(value(departureFromSound(bolts, printed.toReversed(), 'loosen'))).toBeNull();
+		expect(value(departureFromSound(bolts, value(orderFromOutside(bolts)), 'loosen'))).toBeNull();
 		const own = value(orderFromMiddle(bolts));
 		expect(value(departureFromSound(bolts, own))).toBeNull();
 	});
@@ -74,6 +114,19 @@ describe('tightening orders, published', () => {
 		const stages = value(thirdsNm(inputs.T ?? 0));
 		for (const [at, wanted] of (expected as unknown as number[]).entries())
 			expect(Math.abs((stages[at] ?? 0) - wanted)).toBeLessThanOrEqual(tolerance.value ?? 0);
+	});
+	it.each(only(/^OR02/))('%s', (_, { inputs, expected }) => {
+		const screws = Array.from({ length: inputs.screws ?? 0 }, (__, at) => `screw ${at + 1}`);
+		const steps = value(stageSequence(screws, inputs.stages ?? 0));
+		expect(steps.map(({ stage, bolt }) => `${bolt} stage ${stage}`)).toEqual(expected);
+	});
+	it.each(only(/^OR3[35]/))('%s: one round a stage, all slackened where it says so', (_, entry) => {
+		const printed = entry.expected as unknown as (number | string)[];
+		const slack = printed.findIndex((one) => one === 0 || String(one).startsWith('loosen'));
+		const passes = value(stagePasses(['a', 'b', 'c'], printed.length - 1, slack));
+		expect(passes).toHaveLength(printed.length);
+		expect(passes.findIndex(({ stage }) => stage === undefined)).toBe(slack);
+		expect(passes[slack]?.bolts).toEqual(['c', 'b', 'a']);
 	});
 	it.each(only(/^OR34/))('%s', (_, entry) => {
 		const stages = [

@@ -1,6 +1,7 @@
 import { computedNumber } from '../computed-number';
 import { cannot, computed, type Outcome } from '../outcome';
 import type { Stage } from './plan';
+import { stagePasses } from './stage-passes';
 
 export type SequenceStep = { stage: number; bolt: string };
 
@@ -13,11 +14,10 @@ export type SequenceStep = { stage: number; bolt: string };
  * @example stageSequence(['a', 'b'], 2) // a 1, b 1, a 2, b 2
  */
 export function stageSequence(order: readonly string[], stages: number): Outcome<SequenceStep[]> {
-	if (order.length === 0) return cannot('there is no bolt to tighten');
-	if (!Number.isInteger(stages) || stages < 1 || stages > 12)
-		return cannot('a plan has one to twelve stages');
+	const passes = stagePasses(order, stages);
+	if (!passes.ok) return passes;
 	return computed(
-		Array.from({ length: stages }, (_, at) => order.map((bolt) => ({ stage: at + 1, bolt }))).flat()
+		passes.value.flatMap(({ stage = 0, bolts }) => bolts.map((bolt) => ({ stage, bolt })))
 	);
 }
 

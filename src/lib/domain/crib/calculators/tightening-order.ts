@@ -1,10 +1,6 @@
 import { patternFaults } from '$lib/kernel/fasteners/bolt-pattern';
-import {
-	departureFromSound,
-	firstWrongStep,
-	loosening,
-	orderFromMiddle
-} from '$lib/kernel/fasteners/tightening-order';
+import { departureFromSound, firstWrongStep } from '$lib/kernel/fasteners/departure';
+import { loosening, orderFromMiddle } from '$lib/kernel/fasteners/tightening-order';
 import { cannot, computed, type Outcome } from '$lib/kernel/outcome';
 import { textOf } from '../cells';
 import { calculator } from '../calculator';

@@ -1,6 +1,7 @@
 import type { Formula } from '../../formula';
 import { forgottenExtension, withDrag } from '../drag';
 import { effectiveLever, torqueAtFastener, wrenchSetting } from '../extension';
+import { shareOfScale } from '../wrench-range';
 
 const leverRule = 'US Army TM 1-1500-204-23-9, chapter 8, figure 8-16; FAA AC 43.13-1B, 7-40';
 const lever = { lengthL: 400, extensionE: 100, angleDeg: 60 };
@@ -64,6 +65,18 @@ export const leverFormulas: readonly Formula[] = [
 			says: 'L 400 mm, E 60 mm straight on',
 			gives: () => forgottenExtension(400, 60, 0),
 			wanted: 0.15,
+			within: 1e-9
+		}
+	},
+	{
+		id: 'fasteners/share-of-scale',
+		works: shareOfScale,
+		formula: 'share = Tw / Tfull',
+		source: 'US Army TM 1-1500-204-23-9, table 8-1: ±4 % of the reading from 20 % of full scale on',
+		example: {
+			says: '40 N·m on a wrench of 200 N·m',
+			gives: () => shareOfScale(40, 200),
+			wanted: 0.2,
 			within: 1e-9
 		}
 	}

@@ -1,7 +1,8 @@
 import { computed, type Outcome } from '../../outcome';
 import type { Formula } from '../../formula';
 import { thirdsNm } from '../stage-sequence';
-import { orderFromMiddle, soundNext } from '../tightening-order';
+import { soundNext, soundNextLoose } from '../sound-next';
+import { orderFromMiddle, orderFromOutside } from '../tightening-order';
 
 /** Eight bolts around a flange, named by their place on the turn. */
 const flange = Array.from({ length: 8 }, (_, at) => ({
@@ -9,6 +10,8 @@ const flange = Array.from({ length: 8 }, (_, at) => ({
 	xMm: 100 * Math.cos((at * Math.PI) / 4),
 	yMm: 100 * Math.sin((at * Math.PI) / 4)
 }));
+/** Four in a row, such as the bolts of a narrow cover. */
+const row = [1, 2, 3, 4].map((at) => ({ id: String(at), xMm: 50 * at, yMm: 0 }));
 const first = (found: Outcome<string[]>, at: number): Outcome<number> =>
 	found.ok ? computed(Number(found.value[at])) : found;
 
@@ -36,6 +39,30 @@ export const orderFormulas: readonly Formula[] = [
 			says: 'eight around a flange: the third of them',
 			gives: () => first(orderFromMiddle(flange), 2),
 			wanted: 3,
+			within: 0.01
+		}
+	},
+	{
+		id: 'fasteners/sound-next-loose',
+		works: soundNextLoose,
+		formula: 'flange: as for tightening; else largest distance from the middle',
+		source: 'reverse of the centre-outward rule, common practice, no source',
+		example: {
+			says: 'four in a row, named left to right: an end comes first',
+			gives: () => first(soundNextLoose(row, []), 0),
+			wanted: 1,
+			within: 0.01
+		}
+	},
+	{
+		id: 'fasteners/order-from-outside',
+		works: orderFromOutside,
+		formula: 'the reverse of the tightening order where that is sound, else crosswise',
+		source: 'reverse of the centre-outward rule, common practice, no source',
+		example: {
+			says: 'four in a row, named left to right: the last to be loosened',
+			gives: () => first(orderFromOutside(row), 3),
+			wanted: 2,
 			within: 0.01
 		}
 	},
