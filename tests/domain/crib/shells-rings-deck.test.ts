@@ -175,6 +175,17 @@ describe('pistons at the deck', () => {
 			})
 		);
 	});
+	it('takes the limits of a sheet that prints how high the crowns stand', () => {
+		const diesel = catalogue().engines.find((one) => one.key === 'av4-2200d');
+		if (!diesel) throw new Error('the data sheet is gone');
+		expect(deckHeight.presets?.(diesel)).toEqual([
+			expect.objectContaining({
+				key: 'piston.protrusion',
+				values: { least: '0.35', most: '0.55' }
+			})
+		]);
+		expect(deckHeight.presets?.(sheet)).toEqual([]);
+	});
 	it('asks for both ends of each piston', () => {
 		expect(typed(deckHeight, { pistons: '0.5_' }).faults.pistons).toContain('Other end');
 	});

@@ -49,6 +49,12 @@ export function figuresOf(sheet: DataSheet): SheetFigures {
 				threadPitchMm: found.thread.pitchMm,
 				singleUse: found.yieldTightened || /new each time/i.test(found.reuse)
 			});
+		},
+		steps(key) {
+			const found = sheet.oversizes.find((one) => one.key === key);
+			return found
+				? computed({ key, words: found.words, stepsMm: found.stepsMm })
+				: cannot(`the data sheet ${sheet.code} has no oversizes ${key}`);
 		}
 	};
 }

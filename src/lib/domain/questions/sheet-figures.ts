@@ -40,12 +40,16 @@ export type SheetTightening = {
 	singleUse: boolean;
 };
 
+/** Sizes that a worn part can be machined to, as steps above zero. */
+export type SheetSteps = { key: string; words: string; stepsMm: number[] };
+
 export type SheetFigures = {
 	/** "AV3-1150, revision 1" */
 	title: string;
 	figure(key: string): Outcome<SheetFigure>;
 	pattern(key: string): Outcome<SheetPattern>;
 	tightening(key: string): Outcome<SheetTightening>;
+	steps(key: string): Outcome<SheetSteps>;
 };
 
 /** For a question that names no data sheet: asking for a figure is then the author's slip. */
@@ -53,5 +57,6 @@ export const noSheet: SheetFigures = {
 	title: 'no data sheet',
 	figure: (key) => cannot(`the question names no data sheet to find ${key} in`),
 	pattern: (key) => cannot(`the question names no data sheet to find ${key} in`),
-	tightening: (key) => cannot(`the question names no data sheet to find ${key} in`)
+	tightening: (key) => cannot(`the question names no data sheet to find ${key} in`),
+	steps: (key) => cannot(`the question names no data sheet to find ${key} in`)
 };

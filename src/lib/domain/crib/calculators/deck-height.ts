@@ -110,7 +110,15 @@ export const deckHeight = calculator({
 				}))
 			}
 		});
-	}
+	},
+	presets: (sheet) =>
+		sheet.dimensions
+			.filter(({ key, unit, build }) => unit === 'mm' && build && /protrusion$/i.test(key))
+			.map(({ key, words, build }) => ({
+				key,
+				words,
+				values: { least: String(build?.least), most: String(build?.most) }
+			}))
 });
 
 type Judged = { [K in 'least' | 'most' | 'uncertainty']: number | undefined };

@@ -4,7 +4,7 @@ import type { Step } from '../../working';
 import { calculator } from '../calculator';
 import { choice, list, table, type TableRow } from '../field';
 import { clearancePresets } from './bores/clearance-presets';
-import { length, mm, uncertaintyOf } from './bores/faces';
+import { fine, length, mm, uncertaintyOf } from './bores/faces';
 import { limitFields } from './bores/limit-fields';
 import { scaleStep } from './bores/scale-step';
 import { ruledBothEnds } from './bores/two-sided';
@@ -63,7 +63,7 @@ export const gaugingThread = calculator({
 		if (!rulings.ok) return rulings;
 		return computed({
 			lines: [
-				{ key: 'mean', words: 'Mean clearance', value: mean, ...mm, main: true },
+				{ key: 'mean', words: 'Mean clearance', value: mean, ...fine, main: true },
 				{ key: 'taper', words: 'Taper along the thread', value: taper, ...mm, main: true },
 				{ key: 'least', words: 'Least clearance, where it is widest', value: least, ...mm },
 				{ key: 'most', words: 'Most clearance, where it is narrowest', value: most, ...mm }
@@ -75,7 +75,7 @@ export const gaugingThread = calculator({
 					rule: 'Σ c / n',
 					formula: `(${values.map((one) => figure(one)).join(' + ')}) / ${values.length}`,
 					value: mean,
-					...mm
+					...fine
 				},
 				{
 					words: 'Taper: largest less smallest',

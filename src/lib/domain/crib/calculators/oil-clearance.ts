@@ -4,7 +4,7 @@ import { oilClearance as clearanceOf } from '$lib/kernel/geometry/oil-clearance'
 import { computed } from '$lib/kernel/outcome';
 import { calculator } from '../calculator';
 import { clearancePresets } from './bores/clearance-presets';
-import { diameters, mm, uncertaintyOf } from './bores/faces';
+import { diameters, fine, mm, uncertaintyOf } from './bores/faces';
 import { limitFields } from './bores/limit-fields';
 import { ofBoth } from './bores/of-both';
 import { ruledBothEnds } from './bores/two-sided';
@@ -61,7 +61,7 @@ export const oilClearance = calculator({
 			lines: [
 				{ key: 'least', words: 'Least clearance', value: least, ...mm, main: true },
 				{ key: 'most', words: 'Most clearance', value: most, ...mm, main: true },
-				{ key: 'mean', words: 'Mean clearance', value: mean, ...mm },
+				{ key: 'mean', words: 'Mean clearance', value: mean, ...fine },
 				{
 					key: 'usual',
 					words: 'Rule of thumb, a thousandth of the pin; never a limit',
@@ -89,7 +89,7 @@ export const oilClearance = calculator({
 					rule: 'mean = mean bore − mean pin',
 					formula: `${sumOf(bore)} − ${sumOf(pin)}`,
 					value: mean,
-					...mm
+					...fine
 				},
 				...doubt.steps
 			],

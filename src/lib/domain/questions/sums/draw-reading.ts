@@ -7,6 +7,11 @@ export function shown(value: number, decimals: number): number {
 	return Number(value.toFixed(decimals));
 }
 
+/** A step's value as it is shown; none where it cannot be worked. */
+export function worked(found: Outcome<number>, decimals: number): { value?: number } {
+	return found.ok ? { value: shown(found.value, decimals) } : {};
+}
+
 /**
  * The size of a part that has run: between its printed sizes and a little beyond its wear limit,
  * on the side that it wears to. Never anything that a bench could not show.

@@ -1,8 +1,8 @@
+import { fitOf } from '$lib/kernel/geometry/fit';
 import { cannot, computed, type Outcome } from '$lib/kernel/outcome';
-import { tidy } from '$lib/kernel/geometry/diameter-grid';
 import { z } from 'zod';
 import { sheetKeySchema } from '../words';
-import { drawWorn, shown } from './draw-reading';
+import { drawWorn, worked } from './draw-reading';
 import type { Sum } from './sum';
 
 /** Bore minus what runs in it, one reading of each: a piston at the stated height, a stem in a guide. */
@@ -45,14 +45,22 @@ export const fitClearance: Sum<Parameters, Inputs> = {
 		{ words: outerWords, value: outer, unit: 'mm', decimals },
 		{ words: innerWords, value: inner, unit: 'mm', decimals }
 	],
-	expected: ({ outer, inner, decimals }) =>
-		computed({ value: tidy(outer - inner), unit: 'mm', decimals }),
+	expected({ outer, inner, decimals }) {
+		const between = betweenMm(outer, inner);
+		return between.ok ? computed({ value: between.value, unit: 'mm', decimals }) : between;
+	},
 	working: ({ outer, inner, decimals }) => [
 		{
 			words: 'Bore less what runs in it',
 			formula: `${outer.toFixed(decimals)} − ${inner.toFixed(decimals)}`,
-			value: shown(outer - inner, decimals),
+			...worked(betweenMm(outer, inner), decimals),
 			unit: 'mm'
 		}
 	]
 };
+
+/** One reading of each: least and most are the same. */
+function betweenMm(outer: number, inner: number): Outcome<number> {
+	const found = fitOf({ leastMm: outer, mostMm: outer }, { leastMm: inner, mostMm: inner });
+	return found.ok ? computed(found.value.leastMm) : found;
+}

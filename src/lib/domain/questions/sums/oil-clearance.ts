@@ -2,7 +2,7 @@ import { oilClearance as clearanceOf } from '$lib/kernel/geometry/oil-clearance'
 import { computed, type Outcome } from '$lib/kernel/outcome';
 import { z } from 'zod';
 import { sheetKeySchema } from '../words';
-import { drawAround, drawWorn, shown } from './draw-reading';
+import { drawAround, drawWorn, shown, worked } from './draw-reading';
 import type { Sum } from './sum';
 
 /** Bearing bore (shells in, cap tightened) minus journal, least or most over a grid. */
@@ -59,10 +59,8 @@ export const oilClearance: Sum<Parameters, Inputs> = {
 		}))
 	],
 	expected({ ask, bores, pins, decimals }) {
-		const found = clearanceOf([bores], [pins]);
-		if (!found.ok) return found;
-		const value = ask === 'least' ? found.value.leastMm : found.value.mostMm;
-		return computed({ value, unit: 'mm', decimals });
+		const found = askedOf(ask, bores, pins);
+		return found.ok ? computed({ value: found.value, unit: 'mm', decimals }) : found;
 	},
 	working({ ask, bores, pins, decimals }) {
 		const [bore, pin] =
@@ -76,9 +74,19 @@ export const oilClearance: Sum<Parameters, Inputs> = {
 			{
 				words: 'Bore less pin',
 				formula: `${bore.toFixed(decimals)} − ${pin.toFixed(decimals)}`,
-				value: shown(bore - pin, decimals),
+				...worked(askedOf(ask, bores, pins), decimals),
 				unit: 'mm'
 			}
 		];
 	}
 };
+
+function askedOf(
+	ask: Parameters['ask'],
+	bores: readonly number[],
+	pins: readonly number[]
+): Outcome<number> {
+	const found = clearanceOf([bores], [pins]);
+	if (!found.ok) return found;
+	return computed(ask === 'least' ? found.value.leastMm : found.value.mostMm);
+}

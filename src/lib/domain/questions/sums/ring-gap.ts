@@ -1,7 +1,8 @@
+import { ringGapGrowthMm, ringGapInMm } from '$lib/kernel/geometry/end-play';
 import { computed, type Outcome } from '$lib/kernel/outcome';
 import { z } from 'zod';
 import { sheetKeySchema } from '../words';
-import { shown } from './draw-reading';
+import { shown, worked } from './draw-reading';
 import type { Sum } from './sum';
 
 /** How much wider a ring's gap stands in a worn bore: pi times the growth of the bore. */
@@ -28,20 +29,27 @@ export const ringGap: Sum<Parameters, Inputs> = {
 		{ words: 'End gap in the unworn part of the bore', value: gap, unit: 'mm', decimals },
 		{ words: 'The bore is larger there by', value: boreGrowth, unit: 'mm', decimals: 2 }
 	],
-	expected: ({ boreGrowth, gap }) =>
-		computed({ value: gap + Math.PI * boreGrowth, unit: 'mm', decimals: 2 }),
-	working: ({ boreGrowth, gap, decimals }) => [
-		{
-			words: 'The circumference grows by π times the diameter’s growth',
-			formula: `π × ${boreGrowth.toFixed(2)}`,
-			value: shown(Math.PI * boreGrowth, 3),
-			unit: 'mm'
-		},
-		{
-			words: 'Gap there',
-			formula: `${gap.toFixed(decimals)} + ${(Math.PI * boreGrowth).toFixed(3)}`,
-			value: shown(gap + Math.PI * boreGrowth, 2),
-			unit: 'mm'
-		}
-	]
+	expected({ boreGrowth, gap }) {
+		const there = ringGapInMm(gap, boreGrowth);
+		return there.ok ? computed({ value: there.value, unit: 'mm', decimals: 2 }) : there;
+	},
+	working({ boreGrowth, gap, decimals }) {
+		const growth = worked(ringGapGrowthMm(boreGrowth), 3);
+		return [
+			{
+				words: 'The circumference grows by π times the diameter’s growth',
+				rule: 'Δg = π · ΔD',
+				formula: `π × ${boreGrowth.toFixed(2)}`,
+				...growth,
+				unit: 'mm'
+			},
+			{
+				words: 'Gap there',
+				rule: 'g = g0 + Δg',
+				formula: `${gap.toFixed(decimals)} + ${growth.value?.toFixed(3)}`,
+				...worked(ringGapInMm(gap, boreGrowth), 2),
+				unit: 'mm'
+			}
+		];
+	}
 };

@@ -1,8 +1,8 @@
+import { wearMm } from '$lib/kernel/geometry/wear';
 import { computed, type Outcome } from '$lib/kernel/outcome';
-import { tidy } from '$lib/kernel/geometry/diameter-grid';
 import { z } from 'zod';
 import { sheetKeySchema } from '../words';
-import { drawWorn, shown } from './draw-reading';
+import { drawWorn, worked } from './draw-reading';
 import type { Sum } from './sum';
 
 /** How far a part has worn beyond its printed size: a journal below, a bore above. */
@@ -40,21 +40,30 @@ export const wear: Sum<Parameters, Inputs> = {
 	given: ({ reading, words, decimals }) => [
 		{ words: `${words}, worst reading`, value: reading, unit: 'mm', decimals }
 	],
-	expected: ({ reading, printed, decimals }) =>
-		computed({ value: tidy(Math.abs(reading - printed)), unit: 'mm', decimals }),
-	working: ({ reading, printed, growing, decimals }) => [
-		{
-			words: `Printed ${growing ? 'greatest' : 'least'} size, from the data sheet`,
-			value: printed,
-			unit: 'mm'
-		},
-		{
-			words: 'Difference',
-			formula: growing
-				? `${reading.toFixed(decimals)} − ${printed.toFixed(decimals)}`
-				: `${printed.toFixed(decimals)} − ${reading.toFixed(decimals)}`,
-			value: shown(Math.abs(reading - printed), decimals),
-			unit: 'mm'
-		}
-	]
+	expected(inputs) {
+		const worn = wornMm(inputs);
+		return worn.ok ? computed({ value: worn.value, unit: 'mm', decimals: inputs.decimals }) : worn;
+	},
+	working(inputs) {
+		const { reading, printed, growing, decimals } = inputs;
+		return [
+			{
+				words: `Printed ${growing ? 'greatest' : 'least'} size, from the data sheet`,
+				value: printed,
+				unit: 'mm'
+			},
+			{
+				words: 'Difference',
+				formula: growing
+					? `${reading.toFixed(decimals)} − ${printed.toFixed(decimals)}`
+					: `${printed.toFixed(decimals)} − ${reading.toFixed(decimals)}`,
+				...worked(wornMm(inputs), decimals),
+				unit: 'mm'
+			}
+		];
+	}
 };
+
+function wornMm({ growing, reading, printed }: Inputs): Outcome<number> {
+	return wearMm(growing ? 'bore' : 'journal', reading, printed);
+}

@@ -3,6 +3,8 @@ import { grid, quantity } from '../../field';
 /** What the fields of this drawer have in common. */
 export const length = { dimension: 'length', unit: { metric: 'mm', inch: 'in' } } as const;
 export const mm = { unit: 'mm', decimals: 3 } as const;
+/** A mean says one place more than what it is taken from. */
+export const fine = { unit: 'mm', decimals: 4 } as const;
 
 /** Diameters by depth and plane. */
 export function diameters(given: { words: string; hint: string; example: string }) {

@@ -41,5 +41,9 @@ function isBore({ key, unit, nominal, runAgain }: Dimension): boolean {
 }
 
 function isJournal({ key, unit, runAgain }: Dimension): boolean {
-	return unit === 'mm' && /(pin|journal)\w*\.diameter$/i.test(key) && runAgain?.least !== undefined;
+	return (
+		unit === 'mm' &&
+		/((pin|journal)\w*\.diameter|\.journal)$/i.test(key) &&
+		runAgain?.least !== undefined
+	);
 }
