@@ -1,5 +1,6 @@
 import { cannot, computed } from '$lib/kernel/outcome';
 import type { SheetFigures } from '../questions/sheet-figures';
+import { nutFactorOf } from './nut-factors';
 import type { DataSheet } from './schema';
 import { dimensionOf, fastenerOf, patternOf } from './value-of';
 import { unitWords } from './unit-words';
@@ -46,7 +47,11 @@ export function figuresOf(sheet: DataSheet): SheetFigures {
 						? { kind: 'torque' as const, torqueNm: stage.torqueNm }
 						: { kind: 'angle' as const, angleDeg: stage.angleDeg }
 				),
+				threadDiameterMm: found.thread.diameterMm,
 				threadPitchMm: found.thread.pitchMm,
+				propertyClass: found.propertyClass,
+				nutFactor: nutFactorOf(found),
+				gripMm: found.gripMm,
 				singleUse: found.yieldTightened || /new each time/i.test(found.reuse)
 			});
 		},

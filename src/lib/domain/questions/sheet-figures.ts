@@ -1,3 +1,5 @@
+import type { NutFactorRange } from '$lib/kernel/fasteners/nut-factor';
+import type { PropertyClass } from '$lib/kernel/fasteners/strength';
 import { cannot, type Outcome } from '$lib/kernel/outcome';
 
 /**
@@ -36,7 +38,13 @@ export type SheetTightening = {
 	key: string;
 	words: string;
 	stages: SheetStage[];
-	threadPitchMm?: number;
+	threadDiameterMm: number;
+	threadPitchMm: number;
+	propertyClass: PropertyClass;
+	/** Between what the lubrication lets the nut factor lie. */
+	nutFactor: NutFactorRange;
+	/** What is stretched, where the sheet says it. */
+	gripMm?: number;
 	singleUse: boolean;
 };
 

@@ -1,4 +1,5 @@
 import { cannot, computed, type Outcome } from '../outcome';
+import { timesAsStiffNPerMm } from './joint-stiffness';
 import type { Plan, PlannedStage } from './plan';
 import type { Loads } from './proof-load';
 import { boltStiffnessNPerMm } from './stiffness';
@@ -18,13 +19,15 @@ export function afterAngle(
 	if (!gripMm || !(gripMm > 0)) return cannot('an angle needs the length that is stretched');
 	const bolt = boltStiffnessNPerMm([{ lengthMm: gripMm, areaMm2: loads.areaMm2 }]);
 	if (!bolt.ok) return bolt;
+	const joint = timesAsStiffNPerMm(jointPerBolt, bolt.value);
+	if (!joint.ok) return joint;
 	const turn = (snugN: number) =>
 		tightenByAngle({
 			snugN,
 			angleDeg,
 			pitchMm,
 			boltNPerMm: bolt.value,
-			jointNPerMm: bolt.value * jointPerBolt,
+			jointNPerMm: joint.value,
 			yieldN: loads.yieldN
 		});
 	const [soft, hard] = [turn(snug.leastN), turn(snug.mostN)];

@@ -9,6 +9,7 @@ import type { Section } from './stiffness';
  * @param threadAreaMm2 stress area of the thread, mm²
  * @param shank length and diameter, mm, no longer than the grip; left out, all of it is thread
  * @returns sections from the head on
+ * Source: VDI 2230 part 1, a bolt as sections in series.
  * @example boltSections(95, 61.2, { lengthMm: 60, diameterMm: 10 }) // shank, then 35 mm of thread
  */
 export function boltSections(

@@ -14,7 +14,9 @@ export function pitchOfMm(thread: BoltThread): number {
 /**
  * Stress area of either kind of thread, rounded as the tables of its standard have it.
  *
- * @returns mm²
+ * @param thread sizes in mm, or threads per inch
+ * @returns mm²; "cannot" for a thread that cannot be cut
+ * Source: ISO 898-1:2013, tables 4 to 7 (three figures); ASME B1.1 tables (four places of in²).
  * @example tabledAreaMm2({ diameterMm: 10, pitchMm: 1.25 }) // 61.2
  */
 export function tabledAreaMm2(thread: BoltThread): Outcome<number> {

@@ -6,6 +6,21 @@ export const partModulusMPa = { steel: 205_000, iron: 100_000, aluminium: 70_000
 export type PartMaterial = keyof typeof partModulusMPa;
 
 /**
+ * Stiffness of clamped parts by how many times stiffer than the bolt they are.
+ *
+ * Formula: kj = n · kb.
+ * @param times n, above zero: two to five are met in heads and caps (common practice, no source)
+ * @param boltNPerMm kb, N/mm
+ * @returns N/mm
+ * Source: definition of a ratio of stiffnesses.
+ * @example timesAsStiffNPerMm(3, 132_000) // 396 000
+ */
+export function timesAsStiffNPerMm(times: number, boltNPerMm: number): Outcome<number> {
+	if (!(times > 0) || !(boltNPerMm > 0)) return cannot('a stiffness is a number above zero');
+	return computedNumber(times * boltNPerMm);
+}
+
+/**
  * Stiffness of clamped parts taken as a sleeve around the bolt.
  *
  * Formula: k = E · π/4 · (D² − dh²) / L.

@@ -82,7 +82,9 @@ export function gradeLoads(
 /**
  * Loads of either kind of thread in any class or grade.
  *
- * @returns area in mm², loads in N
+ * @param thread sizes in mm, or threads per inch @param strength such as '10.9' or 'SAE 5'
+ * @returns area in mm², loads in N; "cannot" outside the sizes of a grade
+ * Source: as `boltLoads` and `gradeLoads`.
  * @example threadLoads({ diameterMm: 10, pitchMm: 1.25 }, '10.9') // proof 50 796 N
  */
 export function threadLoads(thread: BoltThread, strength: StrengthName): Outcome<Loads> {

@@ -35,7 +35,7 @@ export function coarsePitchMm(diameterMm: number): number | undefined {
 	return metric[diameterMm]?.[0];
 }
 
-/** Pitches of a metric size, mm, coarse first; none for a size that is none of the series. */
+/** Pitches of a metric size, mm, coarse first; none for a size that is none of the series. Source: ISO 262:1998. */
 export function standardPitchesMm(diameterMm: number): readonly number[] {
 	return metric[diameterMm] ?? [];
 }

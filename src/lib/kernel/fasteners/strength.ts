@@ -88,6 +88,7 @@ export const strengthNames: readonly StrengthName[] = [
  *
  * @param name such as '10.9' or 'SAE 5' @param diameterMm nominal diameter, mm
  * @returns N/mm²; "cannot" outside the sizes of a grade
+ * Source: as `classStrength` and `gradeStrength`.
  * @example strengthOf('SAE 5', 12.7) // proof 586 N/mm²
  */
 export function strengthOf(name: StrengthName, diameterMm: number): Outcome<Strength> {

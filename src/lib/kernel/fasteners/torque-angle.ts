@@ -22,6 +22,8 @@ export type Tightened = {
 	/** Angle after snug at which yield begins, degrees; beyond `angleDeg` where it is not reached. */
 	angleAtYieldDeg: number;
 	beyondYield: boolean;
+	/** What of the angle was turned past yield, degrees. */
+	pastYieldDeg: number;
 	/** Elastic and lasting stretch of the bolt, mm. */
 	elasticMm: number;
 	lastingMm: number;
@@ -69,6 +71,7 @@ export function tightenByAngle(asked: TorqueAngle): Outcome<Tightened> {
 		preloadN: preload,
 		angleAtYieldDeg,
 		beyondYield: beyondMm > 0,
+		pastYieldDeg: Math.max(0, angleDeg - angleAtYieldDeg),
 		elasticMm,
 		lastingMm: beyondMm * (1 - hardening),
 		points: beyondMm > 0 ? [start, { angleDeg: angleAtYieldDeg, loadN: yieldN }, end] : [start, end]

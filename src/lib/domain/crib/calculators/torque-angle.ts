@@ -1,27 +1,33 @@
 import { preloadN } from '$lib/kernel/fasteners/preload';
-import { boltLoads } from '$lib/kernel/fasteners/proof-load';
-import { boltStiffnessNPerMm, inSeriesNPerMm } from '$lib/kernel/fasteners/stiffness';
-import { tightenByAngle } from '$lib/kernel/fasteners/torque-angle';
+import { turnedDeg } from '$lib/kernel/fasteners/stage-sequence';
+import { inSeriesNPerMm } from '$lib/kernel/fasteners/stiffness';
+import { angleForPreloadDeg, tightenByAngle } from '$lib/kernel/fasteners/torque-angle';
 import { travelMm } from '$lib/kernel/fasteners/turn';
-import { computed } from '$lib/kernel/outcome';
-import { nutFactorOf } from '../../data-sheets/nut-factors';
+import { lastingStrain } from '$lib/kernel/fasteners/yield-load';
+import { cannot, computed, type Outcome } from '$lib/kernel/outcome';
 import { calculator } from '../calculator';
-import { number, quantity } from '../field';
+import { list, number, quantity } from '../field';
+import { boltOf } from './fasteners/bolt';
 import {
-	boltPresets,
-	diameter,
-	lastTorqueNm,
+	boltFields,
+	coefficient,
+	factorFields,
+	factorSource,
 	length,
-	pitch,
-	propertyClass,
-	torque
+	snugTorque,
+	wantedLoad
 } from './fasteners/bolt-fields';
+import { anglesDeg, boltPresets, factorValues, lastTorqueNm } from './fasteners/bolt-presets';
+import { angleLines, angleNotes } from './fasteners/angle-lines';
+import { angleSteps, type Turned } from './fasteners/angle-steps';
+import { clampedFields, clampedOf } from './fasteners/clamped';
+import { stretchedOf } from './fasteners/stretched';
 
-/** Load of a bolt by a snug torque and an angle, to yield and past it. */
+/** Load of a bolt by a snug torque and angles, to yield and past it. */
 export const torqueAngle = calculator({
 	key: 'torque-angle',
 	title: 'Torque plus angle',
-	says: 'How hard a bolt pulls after a snug torque and an angle, where it begins to yield, and how far it is drawn beyond.',
+	says: 'How hard a bolt pulls after a snug torque and its angles, where it begins to yield, and how far it is drawn beyond.',
 	drawer: 'fasteners',
 	caution:
 		'A bolt that has been turned past yield is fitted once: it is thrown away, however good it looks. Mark head and part before you turn, and count the angle once only.',
@@ -29,17 +35,22 @@ export const torqueAngle = calculator({
 		'fasteners/preload',
 		'fasteners/bolt-loads',
 		'fasteners/bolt-stiffness',
+		'fasteners/times-as-stiff',
+		'fasteners/joint-of-cones',
 		'fasteners/in-series',
+		'fasteners/yield-load',
+		'fasteners/strength-while-turned',
 		'fasteners/travel',
-		'fasteners/torque-angle'
+		'fasteners/torque-angle',
+		'fasteners/angle-for-preload',
+		'fasteners/lasting-strain'
 	],
 	sources: [
-		'How much stiffer the clamped parts are than the bolt: two to five times is met in heads and caps; common practice, no source.'
+		'The model is two straight lines, level past yield unless a hardening is given: it shows how far a bolt is drawn rather than exactly how hard it pulls. Young’s moduli: common handbook values, steel 205 GPa, cast iron 100, aluminium 70.',
+		factorSource
 	],
 	fields: {
-		diameter,
-		pitch,
-		propertyClass,
+		...boltFields,
 		grip: quantity({
 			...length,
 			words: 'Stretched length',
@@ -49,171 +60,145 @@ export const torqueAngle = calculator({
 			most: 2000,
 			example: '95'
 		}),
-		snug: quantity({ ...torque, words: 'Snug torque', least: 0.1, most: 5000, example: '30' }),
-		angle: quantity({
+		shankLength: quantity({
+			...length,
+			words: 'Of it plain shank',
+			hint: 'Left out, all of it counts as thread.',
+			decimals: 1,
+			least: 0.1,
+			most: 2000,
+			optional: true,
+			example: ''
+		}),
+		shankDiameter: quantity({
+			...length,
+			words: 'Diameter of the shank',
+			hint: 'Where it is thinner than the thread, it yields there.',
+			decimals: 2,
+			least: 0.5,
+			most: 200,
+			optional: true,
+			example: ''
+		}),
+		...clampedFields,
+		snug: snugTorque,
+		...factorFields,
+		angle: list({
 			dimension: 'angle',
 			unit: { metric: '°', inch: '°' },
-			words: 'Angle after it, all stages together',
-			decimals: 0,
+			words: 'Angles after it, stage by stage',
+			hint: 'With spaces or semicolons between.',
+			example: '90; 90'
+		}),
+		threadFriction: number({
+			...coefficient,
+			words: 'Friction in the thread',
+			hint: 'With it the twist of tightening is counted: the bolt yields sooner. Oiled steel about 0.12.',
+			optional: true,
+			example: ''
+		}),
+		hardening: number({
+			words: 'Rise past yield, % of the rise before',
+			hint: 'Left out, the load stays level past yield.',
 			least: 0,
-			most: 720,
-			example: '180'
+			most: 50,
+			optional: true,
+			example: ''
 		}),
-		factor: number({
-			words: 'Nut factor K of the snug torque',
-			hint: 'Engine oil 0.15 to 0.20.',
-			least: 0.03,
-			most: 0.6,
-			example: '0.17'
-		}),
-		joint: number({
-			words: 'Clamped parts, times as stiff as the bolt',
-			least: 0.2,
-			most: 100,
-			example: '3',
-			initial: '3'
-		})
+		wanted: wantedLoad
 	},
-	work({ diameter: d, pitch: p, propertyClass: named, grip, snug, angle, factor, joint }) {
-		const loads = boltLoads(d, p, named);
-		if (!loads.ok) return loads;
-		const first = preloadN(snug, factor, d);
-		if (!first.ok) return first;
-		const bolt = boltStiffnessNPerMm([{ lengthMm: grip, areaMm2: loads.value.areaMm2 }]);
+	work(values) {
+		const { snug, leastFactor, mostFactor, angle, hardening, wanted, grip } = values;
+		if (mostFactor < leastFactor) return cannot('the least nut factor lies above the most');
+		if (angle.some((one) => !(one >= 0) || one > 720))
+			return cannot('each angle lies between 0° and 720°');
+		const bolt = boltOf(values);
 		if (!bolt.ok) return bolt;
-		const both = inSeriesNPerMm(bolt.value, bolt.value * joint);
+		const stretched = stretchedOf(bolt.value, values);
+		if (!stretched.ok) return stretched;
+		const { diameterMm, pitchMm } = bolt.value.geometry;
+		const { stiffnessNPerMm, weakest, yieldN, loads } = stretched.value;
+		const parts = clampedOf(values, stiffnessNPerMm, diameterMm, grip);
+		if (!parts.ok) return parts;
+		const both = inSeriesNPerMm(stiffnessNPerMm, parts.value.stiffnessNPerMm);
 		if (!both.ok) return both;
-		const turned = tightenByAngle({
-			snugN: first.value,
-			angleDeg: angle,
-			pitchMm: p,
-			boltNPerMm: bolt.value,
-			jointNPerMm: bolt.value * joint,
-			yieldN: loads.value.yieldN
-		});
-		if (!turned.ok) return turned;
-		const { preloadN: load, angleAtYieldDeg, beyondYield, lastingMm, points } = turned.value;
-		const kn = { unit: 'kN', decimals: 1 };
-		const knPerMm = { unit: 'kN/mm', decimals: 1 };
-		const travel = travelMm(angle, p);
-		const lastingShare = (100 * lastingMm) / grip;
+		const joint = {
+			pitchMm,
+			boltNPerMm: stiffnessNPerMm,
+			jointNPerMm: parts.value.stiffnessNPerMm,
+			yieldN
+		};
+		const whole = turnedDeg(angle.map((angleDeg) => ({ angleDeg })));
+		const turn = (factor: number): Outcome<Turned> => {
+			const first = preloadN(snug, factor, diameterMm);
+			if (!first.ok) return first;
+			const asked = { ...joint, snugN: first.value, hardening: (hardening ?? 0) / 100 };
+			const made = tightenByAngle({ ...asked, angleDeg: whole, tensileN: loads.tensileN });
+			if (!made.ok) return made;
+			const strain = lastingStrain(made.value.lastingMm, weakest.lengthMm);
+			if (!strain.ok) return strain;
+			const needed =
+				wanted === undefined
+					? computed(undefined)
+					: angleForPreloadDeg(wanted * 1000, { ...joint, snugN: first.value });
+			if (!needed.ok) return needed;
+			return computed({
+				factor,
+				snugN: first.value,
+				strain: strain.value,
+				neededDeg: needed.value,
+				...made.value
+			});
+		};
+		const slippery = turn(leastFactor);
+		if (!slippery.ok) return slippery;
+		const dragging = turn(mostFactor);
+		if (!dragging.ok) return dragging;
+		const ends = leastFactor === mostFactor ? [slippery.value] : [slippery.value, dragging.value];
 		return computed({
-			lines: [
-				{ key: 'preload', words: 'Preload', value: load / 1000, ...kn, main: true },
-				{
-					key: 'yield-angle',
-					words: 'Begins to yield after',
-					value: angleAtYieldDeg,
-					unit: '°',
-					decimals: 0,
-					main: true
-				},
-				{ key: 'lasting', words: 'Drawn for good', value: lastingMm, unit: 'mm', decimals: 3 },
-				{
-					key: 'lasting-share',
-					words: 'of its stretched length',
-					value: lastingShare,
-					unit: '%',
-					decimals: 2
-				},
-				{ key: 'yield', words: 'Load at yield', value: loads.value.yieldN / 1000, ...kn }
-			],
+			lines: angleLines(ends, yieldN),
 			working: [
-				{
-					words: 'Load by the snug torque',
-					rule: 'Fs = T / (K · d)',
-					formula: `${snug} / (${factor} · ${d / 1000}) / 1000`,
-					value: first.value / 1000,
-					...kn
-				},
-				{
-					words: 'Stiffness of the bolt',
-					rule: 'kb = E · As / L',
-					formula: `205 · ${loads.value.areaMm2} / ${grip}`,
-					value: bolt.value / 1000,
-					...knPerMm
-				},
-				{
-					words: 'Bolt and parts together',
-					rule: 'k = kb · kj / (kb + kj)',
-					formula: `${(bolt.value / 1000).toFixed(1)} · ${joint} / (1 + ${joint})`,
-					value: both.value / 1000,
-					...knPerMm
-				},
-				{
-					words: 'Way along the thread',
-					rule: 's = P · α / 360°',
-					formula: `${p} · ${angle} / 360`,
-					value: travel,
-					unit: 'mm',
-					decimals: 3
-				},
-				{
-					words: 'Load at yield',
-					rule: 'Fy = As · Re',
-					value: loads.value.yieldN / 1000,
-					...kn
-				},
-				{
-					words: 'Angle at which it begins to yield',
-					rule: 'αy = 360° · (Fy − Fs) / (k · P)',
-					formula: `360 · (${(loads.value.yieldN / 1000).toFixed(1)} − ${(first.value / 1000).toFixed(1)}) / (${(both.value / 1000).toFixed(1)} · ${p})`,
-					value: angleAtYieldDeg,
-					unit: '°',
-					decimals: 0
-				},
-				beyondYield
-					? {
-							words: 'The angle goes past yield: the load stays there',
-							rule: 'F = Fy',
-							value: load / 1000,
-							...kn
-						}
-					: {
-							words: 'Load after the angle',
-							rule: 'F = Fs + k · s',
-							formula: `${(first.value / 1000).toFixed(1)} + ${(both.value / 1000).toFixed(1)} · ${travel.toFixed(3)}`,
-							value: load / 1000,
-							...kn
-						}
+				...bolt.value.areaSteps,
+				...stretched.value.steps,
+				parts.value.step,
+				...angleSteps(ends, {
+					...joint,
+					bothNPerMm: both.value,
+					diameterMm,
+					snugNm: snug,
+					angles: angle,
+					travelMm: travelMm(whole, pitchMm),
+					hardening,
+					drawnMm: weakest.lengthMm,
+					wantedKn: wanted
+				})
 			],
-			notes: beyondYield
-				? [
-						`Turned past yield, by ${(angle - angleAtYieldDeg).toFixed(0)}°: single use. Makers do this on purpose, since the load then hardly depends on friction.`,
-						...(lastingShare > 1
-							? [
-									'Drawn by more than one per cent of its length: look at the angle and the stretched length again.'
-								]
-							: [])
-					]
-				: [],
+			notes: angleNotes(ends, loads.proofN),
 			drawing: {
 				kind: 'torque-angle',
-				lines: [points],
-				stagesDeg: [angle],
-				yieldN: loads.value.yieldN,
-				proofN: loads.value.proofN,
-				angleAtYieldDeg
+				lines: ends.map((one) => one.points),
+				stagesDeg: angle.map((_, at) =>
+					turnedDeg(angle.slice(0, at + 1).map((angleDeg) => ({ angleDeg })))
+				),
+				yieldN,
+				proofN: loads.proofN,
+				angleAtYieldDeg: slippery.value.angleAtYieldDeg
 			}
 		});
 	},
 	presets: (sheet) =>
 		boltPresets(sheet, (bolt) => {
 			const last = lastTorqueNm(bolt);
-			const angle = bolt.stages.reduce(
-				(sum, one) => sum + ('angleDeg' in one ? one.angleDeg : 0),
-				0
-			);
-			if (last === undefined || angle === 0) return undefined;
-			const factor = nutFactorOf(bolt);
+			const angles = anglesDeg(bolt);
+			if (last === undefined || angles.length === 0) return undefined;
 			return {
-				diameter: String(bolt.thread.diameterMm),
-				pitch: String(bolt.thread.pitchMm),
-				propertyClass: bolt.propertyClass,
 				...(bolt.gripMm ? { grip: String(bolt.gripMm) } : {}),
+				shankLength: '',
+				shankDiameter: '',
 				snug: String(last),
-				angle: String(angle),
-				factor: ((factor.least + factor.most) / 2).toFixed(3)
+				...factorValues(bolt),
+				angle: angles.join('; '),
+				wanted: ''
 			};
 		})
 });

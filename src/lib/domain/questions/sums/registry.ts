@@ -1,4 +1,6 @@
 import { at20 } from './at-20';
+import { boltLoad } from './bolt-load';
+import { boltTurn } from './bolt-turn';
 import { calledWithin } from './called-within';
 import { cornerTwist } from './corner-twist';
 import { displacement } from './displacement';
@@ -8,6 +10,7 @@ import { boreGrid, journalGrid } from './grid';
 import { oilClearance } from './oil-clearance';
 import { outOfRound } from './out-of-round';
 import { protrusion } from './protrusion';
+import { preload } from './preload';
 import { readingUncertainty } from './reading-uncertainty';
 import { ringGap } from './ring-gap';
 import { rodLine } from './rod-line';
@@ -20,6 +23,7 @@ import type { AnySum } from './sum';
 import { taper } from './taper';
 import { thread } from './thread';
 import { toolForLimits } from './tool-for-limits';
+import { torqueShare } from './torque-share';
 import { torqueWithExtension } from './torque-with-extension';
 import { valveShim } from './valve-shim';
 import { wear } from './wear';
@@ -27,6 +31,8 @@ import { wear } from './wear';
 export const sumNames = [
 	'at-20',
 	'bore-grid',
+	'bolt-load',
+	'bolt-turn',
 	'called-within',
 	'corner-twist',
 	'displacement',
@@ -37,6 +43,7 @@ export const sumNames = [
 	'oil-clearance',
 	'out-of-round',
 	'protrusion',
+	'preload',
 	'reading-uncertainty',
 	'ring-gap',
 	'rod-line',
@@ -47,6 +54,7 @@ export const sumNames = [
 	'stage-turn',
 	'taper',
 	'tool-for-limits',
+	'torque-share',
 	'torque-with-extension',
 	'valve-shim',
 	'wear'
@@ -57,6 +65,8 @@ export type SumName = (typeof sumNames)[number];
 export const sums: Record<SumName, AnySum> = {
 	'at-20': at20 as AnySum,
 	'bore-grid': boreGrid as AnySum,
+	'bolt-load': boltLoad as AnySum,
+	'bolt-turn': boltTurn as AnySum,
 	'called-within': calledWithin as AnySum,
 	'corner-twist': cornerTwist as AnySum,
 	displacement: displacement as AnySum,
@@ -67,6 +77,7 @@ export const sums: Record<SumName, AnySum> = {
 	'oil-clearance': oilClearance as AnySum,
 	'out-of-round': outOfRound as AnySum,
 	protrusion: protrusion as AnySum,
+	preload: preload as AnySum,
 	'reading-uncertainty': readingUncertainty as AnySum,
 	'ring-gap': ringGap as AnySum,
 	'rod-line': rodLine as AnySum,
@@ -77,6 +88,7 @@ export const sums: Record<SumName, AnySum> = {
 	'stage-turn': stageTurn as AnySum,
 	taper: taper as AnySum,
 	'tool-for-limits': toolForLimits as AnySum,
+	'torque-share': torqueShare as AnySum,
 	'torque-with-extension': torqueWithExtension as AnySum,
 	'valve-shim': valveShim as AnySum,
 	wear: wear as AnySum

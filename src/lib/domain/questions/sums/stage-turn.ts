@@ -1,3 +1,4 @@
+import { leftToTurnDeg, turnedDeg } from '$lib/kernel/fasteners/stage-sequence';
 import { travelMm } from '$lib/kernel/fasteners/turn';
 import { cannot, computed, type Outcome } from '$lib/kernel/outcome';
 import { z } from 'zod';
@@ -20,6 +21,8 @@ type Inputs = {
 	pitchMm: number;
 };
 
+const stagesOf = (angles: readonly number[]) => angles.map((angleDeg) => ({ angleDeg }));
+
 export const stageTurn: Sum<Parameters, Inputs> = {
 	parameters: stageTurnParameters,
 	sheetKeys: ({ tightening }) => [tightening],
@@ -29,17 +32,21 @@ export const stageTurn: Sum<Parameters, Inputs> = {
 		const angles = found.value.stages.flatMap((stage) =>
 			stage.kind === 'angle' ? [stage.angleDeg] : []
 		);
-		const pitchMm = found.value.threadPitchMm;
-		if (angles.length === 0 || pitchMm === undefined)
-			return cannot(`${found.value.words} has no angle stage`);
-		const all = angles.reduce((sum, one) => sum + one, 0);
+		if (angles.length === 0) return cannot(`${found.value.words} has no angle stage`);
+		const all = turnedDeg(stagesOf(angles));
 		if (all < 30) return cannot(`${found.value.words} turns too little to ask about`);
 		// Part of the turn is done: how much is left is this student's own figure.
 		const turned =
 			ask === 'degrees'
 				? random.integer(1, Math.floor(all / 15) - 1) * 15
 				: random.integer(2, Math.floor(all / 15)) * 15;
-		return computed({ ask, words: found.value.words, angles, turned, pitchMm });
+		return computed({
+			ask,
+			words: found.value.words,
+			angles,
+			turned,
+			pitchMm: found.value.threadPitchMm
+		});
 	},
 	prompt: ({ ask }) =>
 		ask === 'degrees'
@@ -51,35 +58,39 @@ export const stageTurn: Sum<Parameters, Inputs> = {
 			? [{ words: 'Pitch of the thread', value: pitchMm, unit: 'mm', decimals: 2 }]
 			: [])
 	],
-	expected: ({ ask, angles, turned, pitchMm }) =>
-		ask === 'degrees'
-			? computed({
-					value: angles.reduce((sum, one) => sum + one, 0) - turned,
-					unit: '°',
-					decimals: 0
-				})
-			: computed({ value: travelMm(turned, pitchMm), unit: 'mm', decimals: 3 }),
-	working: ({ ask, angles, turned, pitchMm }) =>
-		ask === 'degrees'
-			? [
-					{
-						words: 'All angle stages of the data sheet',
-						formula: angles.join(' + '),
-						value: angles.reduce((sum, one) => sum + one, 0),
-						unit: '°'
-					},
-					{
-						words: 'Less what is turned',
-						value: angles.reduce((sum, one) => sum + one, 0) - turned,
-						unit: '°'
-					}
-				]
-			: [
-					{
-						words: 'Pitch times the share of a full turn',
-						formula: `${pitchMm} × ${turned}/360`,
-						value: shown(travelMm(turned, pitchMm), 3),
-						unit: 'mm'
-					}
-				]
+	expected({ ask, angles, turned, pitchMm }) {
+		if (ask === 'travel')
+			return computed({ value: travelMm(turned, pitchMm), unit: 'mm', decimals: 3 });
+		const left = leftToTurnDeg(stagesOf(angles), turned);
+		return left.ok ? computed({ value: left.value, unit: '°', decimals: 0 }) : left;
+	},
+	working({ ask, angles, turned, pitchMm }) {
+		if (ask === 'travel')
+			return [
+				{
+					words: 'Pitch times the share of a full turn',
+					rule: 's = P · α / 360°',
+					formula: `${pitchMm} · ${turned} / 360`,
+					value: shown(travelMm(turned, pitchMm), 3),
+					unit: 'mm'
+				}
+			];
+		const stages = stagesOf(angles);
+		const left = leftToTurnDeg(stages, turned);
+		return [
+			{
+				words: 'All angle stages of the data sheet',
+				formula: angles.join(' + '),
+				value: turnedDeg(stages),
+				unit: '°'
+			},
+			{
+				words: 'Less what is turned',
+				rule: 'left = Σ angle stages − turned',
+				formula: `${turnedDeg(stages)} − ${turned}`,
+				...(left.ok ? { value: left.value } : {}),
+				unit: '°'
+			}
+		];
+	}
 };

@@ -1,5 +1,10 @@
 import type { Formula } from '../../formula';
-import { coneStiffnessNPerMm, jointOfConesNPerMm, sleeveStiffnessNPerMm } from '../joint-stiffness';
+import {
+	coneStiffnessNPerMm,
+	jointOfConesNPerMm,
+	sleeveStiffnessNPerMm,
+	timesAsStiffNPerMm
+} from '../joint-stiffness';
 import { boltStiffnessNPerMm, inSeriesNPerMm, preloadOfStretchN, stretchMm } from '../stiffness';
 import { lastingStrain, yieldLoadN } from '../yield-load';
 
@@ -54,6 +59,18 @@ export const stiffnessFormulas: readonly Formula[] = [
 			gives: () => sleeveStiffnessNPerMm(20, 11, 80, 70_000),
 			wanted: 191_700,
 			within: 100
+		}
+	},
+	{
+		id: 'fasteners/times-as-stiff',
+		works: timesAsStiffNPerMm,
+		formula: 'kj = n · kb',
+		source: 'definition of a ratio of stiffnesses; two to five are met, common practice',
+		example: {
+			says: 'three times 132 kN/mm, N/mm',
+			gives: () => timesAsStiffNPerMm(3, 132_000),
+			wanted: 396_000,
+			within: 0.5
 		}
 	},
 	{
