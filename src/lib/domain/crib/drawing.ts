@@ -25,6 +25,7 @@ import type { FaceDrawing } from './drawings/face';
 import type { GroupStudyDrawing } from './drawings/group-study';
 import type { RodDrawing } from './drawings/rod';
 import type { ShimsDrawing } from './drawings/shims';
+import type { StageRoundsDrawing } from './drawings/stage-rounds';
 import type { ToolZonesDrawing } from './drawings/tool-zones';
 import type { TurnDrawing } from './drawings/turn';
 import type { WarmDrawing } from './drawings/warm';
@@ -38,6 +39,7 @@ export type Drawing =
 	| FaceDrawing
 	| RodDrawing
 	| ShimsDrawing
+	| StageRoundsDrawing
 	| TurnDrawing
 	| WarmDrawing
 	| BudgetDrawing

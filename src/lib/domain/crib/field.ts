@@ -13,6 +13,8 @@ type Common = {
 	hint?: string;
 	/** Left out, the sum goes on without it. */
 	optional?: boolean;
+	/** Asked, and then wanted, only while another field holds this: a flange has no rows. */
+	only?: { field: string; is: string };
 	/** What "Show an example" types here. */
 	example: string;
 	/** Stands in the field from the start, where one value is usual and safe. */

@@ -19,9 +19,10 @@ export function readEntries(of: AnyCalculator, entries: Entries, system: System)
 	const wanted: string[] = [];
 	const values: Record<string, unknown> = {};
 	for (const [key, field] of Object.entries(of.fields)) {
+		if (!isAsked(field, entries)) continue;
 		const entry = entries[key] ?? { text: '' };
 		if (isEmpty(field, entry)) {
-			if (!field.optional) wanted.push(field.words);
+			if (!field.optional || field.only) wanted.push(field.words);
 			continue;
 		}
 		const found = field.read(entry, system);
@@ -30,6 +31,11 @@ export function readEntries(of: AnyCalculator, entries: Entries, system: System)
 	}
 	if (wanted.length > 0 || Object.keys(faults).length > 0) return { faults, wanted };
 	return { faults, wanted, worked: finite(of.work(values as never)) };
+}
+
+/** Whether a field matters as the others stand. */
+export function isAsked({ only }: FieldFace, entries: Entries): boolean {
+	return !only || entries[only.field]?.text === only.is;
 }
 
 export function isEmpty(field: FieldFace, { text }: Entry): boolean {

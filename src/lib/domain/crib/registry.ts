@@ -9,6 +9,7 @@ import { runout } from './calculators/runout';
 import { temperature } from './calculators/temperature';
 import { friction } from './calculators/friction';
 import { preload } from './calculators/preload';
+import { stages } from './calculators/stages';
 import { thread } from './calculators/thread';
 import { torqueAngle } from './calculators/torque-angle';
 import { bore } from './calculators/bore';
@@ -42,6 +43,7 @@ export const calculators: readonly AnyCalculator[] = [
 	thread,
 	extension,
 	tighteningOrder,
+	stages,
 	bore,
 	journal,
 	oilClearance,

@@ -36,6 +36,11 @@ export function thirdsNm(torqueNm: number): Outcome<number[]> {
 	return computed([Math.round(torqueNm / 3), Math.round((2 * torqueNm) / 3), torqueNm]);
 }
 
+/** The last torque of a plan's stages, N·m; none where all of them are angles. */
+export function lastTorqueNm(stages: readonly Stage[]): number | undefined {
+	return stages.flatMap((one) => ('torqueNm' in one ? [one.torqueNm] : [])).at(-1);
+}
+
 /** All the angle that a plan turns after its last torque, degrees. */
 export function turnedDeg(stages: readonly Stage[]): number {
 	return stages.reduce((sum, one) => sum + ('angleDeg' in one ? one.angleDeg : 0), 0);

@@ -1,6 +1,7 @@
 import { computed, type Outcome } from '../../outcome';
 import type { Formula } from '../../formula';
 import { thirdsNm } from '../stage-sequence';
+import { ringPattern } from '../pattern-shapes';
 import { soundNext, soundNextLoose } from '../sound-next';
 import { orderFromMiddle, orderFromOutside } from '../tightening-order';
 
@@ -64,6 +65,21 @@ export const orderFormulas: readonly Formula[] = [
 			gives: () => first(orderFromOutside(row), 3),
 			wanted: 2,
 			within: 0.01
+		}
+	},
+	{
+		id: 'fasteners/ring-pattern',
+		works: ringPattern,
+		formula: 'x = D/2 · sin(360° · i / n), y = D/2 · cos(360° · i / n)',
+		source: 'even division of a circle, by definition',
+		example: {
+			says: 'six on a circle of 100 mm: the second lies 50 · sin 60° to the right',
+			gives: () => {
+				const found = ringPattern(6, 100);
+				return found.ok ? computed(found.value[1]?.xMm ?? 0) : found;
+			},
+			wanted: 43.3013,
+			within: 1e-4
 		}
 	},
 	{

@@ -27,6 +27,7 @@ import Face from './Face.svelte';
 import GroupStudy from './GroupStudy.svelte';
 import Rod from './Rod.svelte';
 import Shims from './Shims.svelte';
+import StageRounds from './StageRounds.svelte';
 import ToolZones from './ToolZones.svelte';
 import Turn from './Turn.svelte';
 import Warm from './Warm.svelte';
@@ -39,6 +40,7 @@ const components: Drawn = {
 	face: Face,
 	rod: Rod,
 	shims: Shims,
+	'stage-rounds': StageRounds,
 	turn: Turn,
 	warm: Warm,
 	budget: Budget,
