@@ -1,3 +1,4 @@
+import { computedNumber } from '../computed-number';
 import { computed, type Outcome } from '../outcome';
 import { stressAreaIn2, stressAreaMm2 } from './stress-area';
 
@@ -25,5 +26,5 @@ export function tabledAreaMm2(thread: BoltThread): Outcome<number> {
 		return area.ok ? computed(Number(area.value.toPrecision(3))) : area;
 	}
 	const area = stressAreaIn2(thread.diameterMm / 25.4, thread.threadsPerInch);
-	return area.ok ? computed(Number(area.value.toFixed(4)) * 25.4 ** 2) : area;
+	return area.ok ? computedNumber(Number(area.value.toFixed(4)) * 25.4 ** 2) : area;
 }
