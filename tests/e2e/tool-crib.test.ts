@@ -1,6 +1,6 @@
 import { calculators } from '../../src/lib/domain/crib/registry';
 import { isTooWide, screenshots } from './support/screenshots';
-import { expect, expectAccessible, test, type Page } from './support/test';
+import { expect, expectAccessible, signIn, test, type Page } from './support/test';
 
 const result = (page: Page) => page.getByRole('region', { name: 'Result' });
 
@@ -66,12 +66,13 @@ test('without script the form works it out', async ({ openContext }) => {
 });
 
 test('once opened it works without a network, and keeps nothing of who opened it', async ({
-	as,
+	openContext,
 	expectTrouble
 }) => {
 	expectTrouble(/ERR_INTERNET_DISCONNECTED/);
 	expectTrouble(/ERR_FAILED .*\/data-sheets\/index\.json/); // the page says so, and goes on
-	const page = await as('edda@averholm.example');
+	const page = await (await openContext({ serviceWorkers: 'allow' })).newPage();
+	await signIn(page, 'edda@averholm.example');
 	await page.goto('/crib');
 	await expect(page.getByText('The tool crib is kept on this device')).toBeVisible({
 		timeout: 30_000

@@ -91,7 +91,12 @@ export const test = base.extend<Fixtures, WorkerFixtures>({
 	openContext: async ({ browser, baseURL, troubles }, use) => {
 		const opened: BrowserContext[] = [];
 		await use(async (options = {}) => {
-			const context = await browser.newContext({ baseURL, ...options });
+			// Every new browser would fetch the whole crib to keep it: the test of that asks for it.
+			const context = await browser.newContext({
+				baseURL,
+				serviceWorkers: 'block',
+				...options
+			});
 			troubles.watch(context);
 			opened.push(context);
 			return context;
